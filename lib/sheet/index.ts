@@ -1,0 +1,6 @@
+export * from './schema'
+export * from './edits'
+export * from './apply-edit'
+export * from './problems'
+export * from './parse-sheet'
+export * from './keys'
