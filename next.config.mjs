@@ -9,7 +9,5 @@ const nextConfig = {
   // The network of a workshop is not ours to use: the build asks nobody for advice.
   experimental: { agentUpgrade: false },
   images: { unoptimized: true },
-  // Tests build and serve beside a running development server.
-  distDir: process.env.NEXT_DIST_DIR ?? '.next',
 }
 export default nextConfig
