@@ -51,7 +51,7 @@ const put = <K extends EditKind, T extends z.ZodType>(kind: K, value: T) =>
   z.strictObject({ id: editId, op: z.literal('put'), kind: z.literal(kind), value })
 
 /** One edit as it comes over the wire. */
-export const editSchema = z.union([
+export const editSchema = z.discriminatedUnion('op', [
   z.discriminatedUnion('kind', [
     put('facade', facadeSchema),
     put('aspect', aspectSchema),

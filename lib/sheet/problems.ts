@@ -39,7 +39,8 @@ function openingProblems({ facade, openings }: Sheet): Problem[] {
   return openings.flatMap((opening, i) => {
     const found: Problem[] = []
     if (opening.sill >= opening.head) found.push({ path: ['openings', i, 'sill'], message: 'The sill must be below the head.' })
-    if (opening.x < left - EPSILON) found.push({ path: ['openings', i, 'x'], message: `${opening.name} starts beyond the left corner of the wall.` })
+    if (opening.x >= right - EPSILON) found.push({ path: ['openings', i, 'x'], message: `${opening.name} lies beyond the right corner of the wall.` })
+    else if (opening.x < left - EPSILON) found.push({ path: ['openings', i, 'x'], message: `${opening.name} starts beyond the left corner of the wall.` })
     else if (opening.x + opening.width > right + EPSILON) found.push({ path: ['openings', i, 'width'], message: `${opening.name} runs beyond the right corner of the wall.` })
     return found
   })

@@ -6,12 +6,11 @@ import {
   AIMS, DEER_PRESSURES, FIXTURE_KINDS, OPENING_KINDS, ROLES_IN_BED, SIDINGS, STATUSES, WALNUTS,
   type Sheet,
 } from '../spacing'
+import { MAX_LENGTH_IN } from '../measure'
 import { plantSchema } from '../plants/schema'
 import { LIGHTS, WATERS } from '../plants/types'
 import { z } from '../zod'
 
-/** No house front is longer than this (1,000 ft): larger numbers are slips of unit or of finger. */
-export const MAX_LENGTH_IN = 12_000
 export const MAX_PLACEMENTS = 2_000
 export const MAX_THINGS = 500
 export const MAX_POINTS = 400
