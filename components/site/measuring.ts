@@ -1,0 +1,191 @@
+/**
+ * What is measured on one facade while somebody types: the sheet as it is kept, and beside it what is typed but not
+ * yet kept. A thing (the house front, one opening, one bed) is kept when a field is left and the whole thing is sound;
+ * until then it waits, with the reason at its field. No React, no DOM.
+ */
+import {
+  applyEdit, applyEdits, aspectSchema, bedSchema, facadeSchema, findProblems, fixtureSchema, inverseOf, listOf, openingSchema,
+  problemsOf, targetOf, walkSchema, type Edit, type EditKind, type ListedKind, type Problem, type ValueOf,
+} from '@/lib/sheet'
+import type { Sheet } from '@/lib/spacing'
+
+export type MeasuredKind = Exclude<EditKind, 'placement'>
+/** One whole thing with the values typed into it. */
+export type Thing = { [K in MeasuredKind]: { kind: K; value: ValueOf[K] } }[MeasuredKind]
+export type MeasuredList = Exclude<ListedKind, 'placement'>
+
+export interface Draft {
+  thing: Thing
+  /** [] when it could be kept as it is. */
+  problems: Problem[]
+}
+
+interface Step {
+  label: string
+  forward: Edit[]
+  back: Edit[]
+}
+
+export interface MeasuringState {
+  /** Kept, and on its way to the server. */
+  sheet: Sheet
+  /** Kept, and what is typed and sound: what the drawing shows. */
+  shown: Sheet
+  drafts: ReadonlyMap<string, Draft>
+  past: readonly Step[]
+  future: readonly Step[]
+  /** The last deed in words, for the status line: "Kitchen removed". */
+  said: string | null
+}
+
+const SCHEMAS = { facade: facadeSchema, aspect: aspectSchema, opening: openingSchema, fixture: fixtureSchema, walk: walkSchema, bed: bedSchema }
+export const LIST_NAMES = { opening: 'openings', fixture: 'fixtures', walk: 'walks', bed: 'beds' } as const
+const PAST_KEPT = 200
+
+const editOf = (thing: Thing, id: string): Edit => ({ id, op: 'put', ...thing }) as Edit
+const keyOf = (thing: Thing): string => {
+  const { kind, target } = targetOf(editOf(thing, ''))
+  return `${kind}:${target}`
+}
+
+/** What a thing is called in a sentence. */
+export function nameOf(thing: Thing): string {
+  switch (thing.kind) {
+    case 'facade':
+      return 'House front'
+    case 'aspect':
+      return 'Facing and light'
+    case 'fixture':
+      return thing.value.kind.replaceAll('-', ' ').replace(/^./, (letter) => letter.toUpperCase())
+    case 'opening':
+    case 'walk':
+    case 'bed':
+      return thing.value.name || 'Without a name'
+  }
+}
+
+/** Where a thing stands in the sheet: the start of the path of its problems. */
+export function pathOf(sheet: Sheet, thing: Thing): (string | number)[] {
+  if (thing.kind === 'facade') return ['facade']
+  if (thing.kind === 'aspect') return ['site']
+  const list = listOf(sheet, thing.kind)
+  const at = list.findIndex(({ id }) => id === thing.value.id)
+  return [LIST_NAMES[thing.kind], at < 0 ? list.length : at]
+}
+
+/** What putting this thing on the sheet would break that is not broken already; [] when it may be kept. */
+export function problemsWith(sheet: Sheet, thing: Thing): Problem[] {
+  const shape = SCHEMAS[thing.kind].safeParse(thing.value)
+  if (!shape.success) {
+    const start = pathOf(sheet, thing)
+    return problemsOf(shape.error).map(({ path, message }) => ({ path: [...start, ...path], message }))
+  }
+  const known = new Set(findProblems(sheet).map((problem) => JSON.stringify(problem)))
+  return findProblems(applyEdit(sheet, editOf(thing, ''))).filter((problem) => !known.has(JSON.stringify(problem)))
+}
+
+const isSame = (sheet: Sheet, thing: Thing) => {
+  const next = applyEdit(sheet, editOf(thing, ''))
+  return JSON.stringify(next) === JSON.stringify(sheet)
+}
+
+interface Options {
+  /** Takes the edits that are to be saved. */
+  send: (edits: Edit[]) => void
+  newId: () => string
+}
+
+/** The store behind the form. `subscribe` and `getState` suit React's external stores. */
+export class Measuring {
+  private state: MeasuringState
+  private readonly listeners = new Set<() => void>()
+
+  constructor(sheet: Sheet, private readonly options: Options) {
+    this.state = { sheet, shown: sheet, drafts: new Map(), past: [], future: [], said: null }
+  }
+
+  readonly getState = (): MeasuringState => this.state
+  readonly subscribe = (listener: () => void): (() => void) => {
+    this.listeners.add(listener)
+    return () => this.listeners.delete(listener)
+  }
+
+  private set(next: Partial<MeasuringState>) {
+    const merged = { ...this.state, ...next }
+    const drafts = new Map([...merged.drafts].map(([key, { thing }]) => [key, { thing, problems: problemsWith(merged.sheet, thing) }]))
+    const sound = [...drafts.values()].filter(({ problems }) => problems.length === 0)
+    const shown = applyEdits(merged.sheet, sound.map(({ thing }) => editOf(thing, '')))
+    this.state = { ...merged, drafts, shown: sound.length > 0 ? shown : merged.sheet }
+    this.listeners.forEach((listener) => listener())
+  }
+
+  /** A field holds a readable value: the drawing follows where the thing is sound. */
+  readonly type = (thing: Thing) => {
+    const drafts = new Map(this.state.drafts)
+    if (isSame(this.state.sheet, thing)) drafts.delete(keyOf(thing))
+    else drafts.set(keyOf(thing), { thing, problems: [] })
+    this.set({ drafts })
+  }
+
+  /** A field is left: whatever is typed and sound is kept and sent; keeping one thing may make another sound. */
+  readonly leave = () => {
+    for (let sound = this.firstSound(); sound; sound = this.firstSound()) {
+      const { thing } = sound
+      const drafts = new Map(this.state.drafts)
+      drafts.delete(keyOf(thing))
+      this.commit([editOf(thing, this.options.newId())], `${nameOf(thing)} changed`, drafts)
+    }
+  }
+
+  private firstSound(): Draft | undefined {
+    return [...this.state.drafts.values()].find(({ problems }) => problems.length === 0)
+  }
+
+  /** Puts a thing at once: a new one, a copy, a choice from a list. Refused, with the reasons, when it is not sound. */
+  readonly put = (thing: Thing, label = `${nameOf(thing)} added`): Problem[] => {
+    const problems = problemsWith(this.state.sheet, thing)
+    if (problems.length === 0) this.commit([editOf(thing, this.options.newId())], label, this.state.drafts)
+    return problems
+  }
+
+  readonly remove = (thing: Extract<Thing, { kind: MeasuredList }>) => {
+    const drafts = new Map(this.state.drafts)
+    drafts.delete(keyOf(thing))
+    this.commit([{ id: this.options.newId(), op: 'remove', kind: thing.kind, target: thing.value.id }], `${nameOf(thing)} removed`, drafts)
+  }
+
+  private commit(forward: Edit[], label: string, drafts: MeasuringState['drafts']) {
+    const back: Edit[] = []
+    let sheet = this.state.sheet
+    for (const edit of forward) {
+      const inverse = inverseOf(sheet, edit, this.options.newId())
+      if (inverse) back.unshift(inverse)
+      sheet = applyEdit(sheet, edit)
+    }
+    const past = [...this.state.past, { label, forward, back }].slice(-PAST_KEPT)
+    this.set({ sheet, drafts, past, future: [], said: label })
+    this.options.send(forward)
+  }
+
+  /** Takes the last step back, as edits of its own. What is typed and waits in other things stays. */
+  readonly undo = () => {
+    const step = this.state.past.at(-1)
+    if (step) this.replay(step.back, { past: this.state.past.slice(0, -1), future: [...this.state.future, step], said: `Taken back: ${step.label}` })
+  }
+
+  readonly redo = () => {
+    const step = this.state.future.at(-1)
+    if (step) this.replay(step.forward, { past: [...this.state.past, step], future: this.state.future.slice(0, -1), said: `Done again: ${step.label}` })
+  }
+
+  private replay(edits: readonly Edit[], next: Partial<MeasuringState>) {
+    const fresh = edits.map((edit) => ({ ...edit, id: this.options.newId() }))
+    const touched = new Set(fresh.map(targetOf).map(({ kind, target }) => `${kind}:${target}`))
+    const drafts = new Map([...this.state.drafts].filter(([key]) => !touched.has(key)))
+    this.set({ ...next, sheet: applyEdits(this.state.sheet, fresh), drafts })
+    this.options.send(fresh)
+  }
+
+  /** Takes over a sheet the server holds. Steps made here could undo what others did, so they are forgotten. */
+  readonly adopt = (sheet: Sheet, said: string) => this.set({ sheet, drafts: new Map(), past: [], future: [], said })
+}
