@@ -1,0 +1,53 @@
+'use client'
+import { LengthField } from './length-field'
+import { useMeasure, useThing } from './measure-context'
+import { ActionButton, FieldGrid, RowTable, Section } from './parts'
+
+/** Heights of the soil along the wall, and how fast it falls away. */
+export function SoilSection() {
+  const { units, readOnly } = useMeasure()
+  const { value: facade, type, choose, leave, problemAt } = useThing('facade')
+  const { grade } = facade
+  const moved = (i: number, change: Partial<(typeof grade)[number]>) => grade.map((point, at) => (at === i ? { ...point, ...change } : point))
+  const addPoint = () => {
+    const last = grade.at(-1)!
+    const right = facade.wall.at(-1)!.x
+    const x = last.x < right ? right : last.x + 48
+    choose({ grade: [...grade, { x, z: last.z }] })
+  }
+  return (
+    <Section id="soil" title="Soil" lead="Stretch a level line along the wall and measure down to the soil. Zero is the level you choose: the soil at the left corner is usual.">
+      <RowTable headings={['At x', 'Soil above zero', '']} label="Soil along the wall">
+        {grade.map((point, i) => (
+          <tr key={i}>
+            <td>
+              <LengthField label="" longLabel={`Soil point ${i + 1}, at x`} units={units} readOnly={readOnly} value={point.x} problem={problemAt('grade', i, 'x')} onValue={(x) => type({ grade: moved(i, { x }) })} onLeave={leave} />
+            </td>
+            <td>
+              <LengthField label="" longLabel={`Soil point ${i + 1}, above zero`} units={units} readOnly={readOnly} value={point.z} problem={problemAt('grade', i, 'z')} onValue={(z) => type({ grade: moved(i, { z }) })} onLeave={leave} />
+            </td>
+            <td>
+              {grade.length > 1 && !readOnly ? (
+                <ActionButton kind="quiet" label={`Remove soil point ${i + 1}`} onPress={() => choose({ grade: grade.toSpliced(i, 1) })}>Remove</ActionButton>
+              ) : null}
+            </td>
+          </tr>
+        ))}
+      </RowTable>
+      {readOnly ? null : <ActionButton kind="plain" onPress={addPoint}>Add a soil point</ActionButton>}
+      <FieldGrid>
+        <LengthField
+          label="Fall away from the wall, per foot"
+          units={units}
+          readOnly={readOnly}
+          value={facade.fall * 12}
+          problem={problemAt('fall')}
+          also={(inches) => `${Math.round(Math.abs(inches / 12) * 1000) / 10} % ${inches < 0 ? 'up, towards the house' : 'down'}`}
+          hint="minus where the soil rises"
+          onValue={(inches) => type({ fall: inches / 12 })}
+          onLeave={leave}
+        />
+      </FieldGrid>
+    </Section>
+  )
+}
