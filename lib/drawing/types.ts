@@ -69,6 +69,8 @@ export interface MarkShape {
 export interface HatchShape {
   kind: 'hatch'
   clip: PathData[]
+  /** Holds the hatched area. */
+  box: Box
   ink: Ink
   spacingPx: number
 }
