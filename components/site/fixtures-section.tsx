@@ -2,7 +2,7 @@
 import { useState } from 'react'
 import { v7 as newId } from 'uuid'
 import { FIXTURE_KINDS, groundAt, type Fixture } from '@/lib/spacing'
-import { HeightField } from './heights'
+import { HeightField, HeightsChoice } from './heights'
 import { LengthField, OptionalLengthField } from './length-field'
 import { useFresh, useMeasure, useThing } from './measure-context'
 import { newFixture } from './new-things'
@@ -62,6 +62,7 @@ export function FixturesSection() {
   }
   return (
     <Section id="fixtures" title="Fixtures" lead="What must stay reachable or visible: meters, condenser, taps, vents, downspouts, house number, lights, escape wells.">
+      <HeightsChoice />
       {fixtures.length === 0 ? <EmptySection>Fixtures on and before the wall stand here, so that plants keep clear of them.</EmptySection> : null}
       <ul className="space-y-4">
         {fixtures.map(({ id }, i) => (

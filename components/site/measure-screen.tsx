@@ -134,7 +134,7 @@ function Bar({ saver }: { saver: Saver }) {
             <ActionButton kind="plain" label={after ? `Redo: ${after.label}` : 'Redo: nothing yet'} isDisabled={!after} onPress={measuring.redo}>Redo</ActionButton>
           </span>
           <SaveStatus state={saving} waitingFields={waiting} onRetry={saver.retry} />
-          <p className="sr-only" role="status">{state.said}</p>
+          <p role="status" className="text-sm text-ink-soft">{state.said}</p>
         </>
       )}
     </div>

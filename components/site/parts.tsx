@@ -1,13 +1,13 @@
 'use client'
 /** The furniture of the measure form: sections, rows of fields, and the smaller choices. */
-import { useId, type ReactNode } from 'react'
+import { useId, useRef, type ReactNode } from 'react'
 import { TypedField } from './typed-field'
 
 /** A part of the form with its heading; `id` is its address in the page. */
 export function Section({ id, title, lead, children }: { id: string; title: string; lead: string; children: ReactNode }) {
   return (
     <section id={id} aria-labelledby={`${id}-title`} className="scroll-mt-20 rounded-sm border border-rule bg-sheet p-4">
-      <h2 id={`${id}-title`} className="font-heading text-2xl">{title}</h2>
+      <h2 id={`${id}-title`} tabIndex={-1} className="font-heading text-2xl outline-none">{title}</h2>
       <p className="mb-3 max-w-prose text-ink-soft">{lead}</p>
       {children}
     </section>
@@ -49,14 +49,20 @@ interface RowProps {
 /** One thing of a list: its fields, and copying and removing it. */
 export function Row({ title, readOnly, onCopy, onRemove, children }: RowProps) {
   const id = useId()
+  const row = useRef<HTMLDivElement>(null)
+  const remove = () => {
+    // The button goes with its row: the focus moves to the heading of the part.
+    row.current?.closest('section')?.querySelector('h2')?.focus()
+    onRemove()
+  }
   return (
-    <div role="group" aria-labelledby={id} className="border-t border-rule pt-2">
+    <div ref={row} role="group" aria-labelledby={id} className="border-t border-rule pt-2">
       <div className="flex flex-wrap items-center justify-between gap-2">
         <h3 id={id} className="font-heading text-lg">{title}</h3>
         {readOnly ? null : (
           <span className="flex gap-1">
             <ActionButton kind="quiet" label={`Copy ${title}`} onPress={onCopy}>Copy</ActionButton>
-            <ActionButton kind="quiet" label={`Remove ${title}`} onPress={onRemove}>Remove</ActionButton>
+            <ActionButton kind="quiet" label={`Remove ${title}`} onPress={remove}>Remove</ActionButton>
           </span>
         )}
       </div>
@@ -85,9 +91,10 @@ export function ActionButton({ kind, label, isDisabled, onPress, children }: Act
     <button
       type="button"
       aria-label={label}
-      disabled={isDisabled}
-      onClick={onPress}
-      className={`min-h-11 min-w-11 rounded-sm px-3 focus-visible:outline-2 focus-visible:outline-offset-1 focus-visible:outline-leaf disabled:opacity-50 ${BUTTONS[kind]}`}
+      // Not `disabled`: the focus stays where it is when the last step is taken back.
+      aria-disabled={isDisabled}
+      onClick={isDisabled ? undefined : onPress}
+      className={`min-h-11 min-w-11 rounded-sm px-3 focus-visible:outline-2 focus-visible:outline-offset-1 focus-visible:outline-leaf aria-disabled:border-rule aria-disabled:text-ink-soft ${BUTTONS[kind]}`}
     >
       {children}
     </button>
