@@ -87,11 +87,14 @@ interface Bump {
 
 /** The bumps of one side, foot to tip: notches are thrown, peaks stand on the true outline. */
 function bumpsOf(envelope: Envelope, { bumps, depth }: EdgeStyle, random: Random): Bump[] {
+  let foot = 0
   return Array.from({ length: bumps }, (_, i) => {
-    const spot = envelope.at((i + 0.5 + (random() - 0.5) * 0.4) / bumps)
+    const tip = i === bumps - 1 ? 1 : (i + 1 + (random() - 0.5) * 0.7) / bumps
+    const spot = envelope.at(foot + (tip - foot) * (0.35 + random() * 0.3))
     const reach = Math.hypot(spot.x, spot.z - envelope.middle) || 1
-    const notch = inward(spot, envelope.middle, Math.min(0.4, (depth * (0.45 + random() * 0.55)) / reach))
-    return { foot: i / bumps, tip: (i + 1) / bumps, notch }
+    const bump = { foot, tip, notch: inward(spot, envelope.middle, Math.min(0.4, (depth * (0.3 + random() * 0.7)) / reach)) }
+    foot = tip
+    return bump
   })
 }
 
@@ -132,15 +135,15 @@ export function drawSilhouette(envelope: Envelope, style: EdgeStyle, random: Ran
   }
 }
 
-/** From the tip back to the foot, a third of the way out on the right: the edge of the shaded side. */
+/** From the tip back to the foot, right of the middle, in bumps towards the light: the edge of the shaded side. */
 function innerLine(envelope: Envelope, random: Random, write: (spot: Spot) => string): string {
   const { bottom, top, radius } = envelope
-  const count = 5
+  const count = Math.min(11, Math.max(5, Math.round((top - bottom) / 9)))
+  const zAt = (step: number) => top + ((bottom - top) * step) / count
   return Array.from({ length: count }, (_, i) => {
-    const zAt = (share: number) => top + (bottom - top) * share
-    const [middle, end] = [zAt((i + 0.5) / count), zAt(i === count - 1 ? 1 : (i + 1) / count)]
-    const lean = 0.42 - 0.18 * ((i + 1) / count)
-    return `Q${write({ x: radius(middle) * (lean + 0.16 * random()), z: middle })} ${write({ x: radius(end) * (lean - 0.12 * random()), z: end })}`
+    const [middle, end] = [zAt(i + 0.4), zAt(i + 1)]
+    const lean = 0.5 - 0.2 * ((i + 1) / count) + 0.12 * random()
+    return `Q${write({ x: radius(middle) * (lean - 0.28 - 0.1 * random()), z: middle })} ${write({ x: radius(end) * lean, z: end })}`
   }).join('')
 }
 

@@ -32,7 +32,7 @@ export function walkNames(sheet: SceneOptions['sheet'], layout: Layout, labeler:
       .filter((spot) => pointInPolygon(spot, outline))
       .map(({ x, y }) => ({ x, y: layout.planY(y) + labeler.px(4), anchor: 'middle' as const }))
     const text = labeler.setWords(words, spots)
-    return text ? [{ ...text, halo: false }] : []
+    return text ? [text] : []
   })
 }
 
@@ -41,7 +41,7 @@ const BAR_FEET = [2, 4, 8, 12, 16, 24, 40, 80, 160, 320]
 
 /** A bar of four parts, about 150 px long, with its figures in feet. */
 export function scaleBar(layout: Layout, labeler: Labeler): Shape[] {
-  const feet = BAR_FEET.findLast((length) => length * 12 * layout.pxPerInch <= 175) ?? BAR_FEET[0]!
+  const feet = BAR_FEET.findLast((length) => length * 12 * layout.pxPerInch <= 200) ?? BAR_FEET[0]!
   const x = layout.left
   const y = layout.plan.y + layout.plan.height - labeler.px(22)
   const part = (feet * 12) / 4

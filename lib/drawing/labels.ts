@@ -38,6 +38,8 @@ export interface KeyLabel {
   at: { x: number; y: number }
   radiusPx: number
   placements: string[]
+  /** Where it would best stand, in order; the places round the point come after. */
+  prefer: { x: number; y: number }[]
   /** Keep off the point itself (plan: the cross stands there). */
   beside: boolean
 }
@@ -54,7 +56,7 @@ export function boxOfWords({ text, sizePx, font }: Words, { x, y, anchor }: Spot
 
 function ringSpots(key: KeyLabel, px: (pixels: number) => number): { x: number; y: number }[] {
   const { at, radiusPx } = key
-  const spots = key.beside ? [] : [at]
+  const spots = key.beside ? [...key.prefer] : [...key.prefer, at]
   const first = key.beside ? radiusPx + 6 : radiusPx * 1.2
   for (let step = 0; step < 14; step += 1) {
     const far = px(first + step * radiusPx * 0.9)

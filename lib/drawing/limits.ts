@@ -26,15 +26,15 @@ const TEXT_PX = 12
 const wordsIn = (ink: Ink, text: string): Words => ({ text, ink, sizePx: TEXT_PX, font: 'mono' })
 
 /** Places above and below a level line, from its left end to its right. */
-function alongLine(x1: number, x2: number, y: number, { px }: Labeler): Spot[] {
+function alongLine(x1: number, x2: number, y: number, { px }: Labeler, belowFirst = false): Spot[] {
   const above = y - px(4)
-  const below = y + px(TEXT_PX + 2)
+  const below = y + px(TEXT_PX + (belowFirst ? 6 : 2))
   const middle = (x1 + x2) / 2
   const row = (at: number): Spot[] => [
     { x: x1, y: at, anchor: 'start' }, { x: x2, y: at, anchor: 'end' }, { x: middle, y: at, anchor: 'middle' },
     { x: x1 - px(3), y: at, anchor: 'end' }, { x: x2 + px(3), y: at, anchor: 'start' },
   ]
-  return [above, below, above - px(15), below + px(15), above - px(30)].flatMap(row)
+  return [...(belowFirst ? [below, above] : [above, below]), above - px(15), below + px(15), above - px(30)].flatMap(row)
 }
 
 function sillLines(sheet: Measured, layout: Layout, margins: Margins, labeler: Labeler): Drawn {
@@ -49,7 +49,7 @@ function sillLines(sheet: Measured, layout: Layout, margins: Margins, labeler: L
     const long = `${name} sill ${formatLength(limit)}`
     const short = `sill ${formatLength(limit)}`
     const fits = long.length * TEXT_PX * 0.61 < (width + 24) * layout.pxPerInch
-    const text = labeler.setWords(wordsIn('sill-line', fits ? long : short), alongLine(x, x + width, y, labeler))
+    const text = labeler.setWords(wordsIn('sill-line', fits ? long : short), alongLine(x, x + width, y, labeler, true))
     if (text) words.push(text)
   }
   return { lines, words }

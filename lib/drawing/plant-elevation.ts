@@ -6,11 +6,11 @@ import { lookOf, type Look } from './foliage'
 import type { Ink } from './palette'
 import { line, path } from './path'
 import { randomFrom } from './random'
-import { bareBranches, bladeStrokes, flowerDots, penFor, stems, textureStrokes, tierStrokes, type Pen } from './strokes'
+import { bareBranches, bladeStrokes, flowerDots, leafMasses, penFor, stems, textureStrokes, tierStrokes, type Pen } from './strokes'
 import type { Box, PathShape, PlantDrawing } from './types'
 
 const BUMP_IN = { fine: 7, medium: 9, coarse: 13 } as const
-const DEPTH_SHARE = { fine: 0.05, medium: 0.075, coarse: 0.11 } as const
+const DEPTH_SHARE = { fine: 0.045, medium: 0.06, coarse: 0.09 } as const
 
 export interface Subject {
   plant: Plant
@@ -37,7 +37,7 @@ function styleOf({ plant, placement }: Subject, envelope: Envelope): EdgeStyle {
   return {
     edge,
     bumps: Math.min(26, Math.max(4, Math.round(reach / bump))),
-    depth: Math.max(0.3, Math.min(envelope.widest, envelope.top - envelope.bottom) * DEPTH_SHARE[plant.texture] * (edge === 'bladed' ? 3 : 1)),
+    depth: Math.max(0.3, Math.min(envelope.widest, envelope.top - envelope.bottom) * DEPTH_SHARE[plant.texture] * (edge === 'bladed' ? 3 : plant.leaf === 'herbaceous' ? 1.9 : 1)),
   }
 }
 
@@ -62,7 +62,9 @@ function inside({ plant, placement }: Subject, envelope: Envelope, pen: Pen): st
   if (isBladed(plant)) return bladeStrokes(envelope, random, pen, 0.3)
   if (isFronded(plant)) return bladeStrokes(envelope, random, pen, 0.6) + textureStrokes(envelope, plant.texture, random, pen)
   if (isNeedled(plant) && plant.habit === 'pyramidal') return tierStrokes(envelope, random, pen)
-  return textureStrokes(envelope, plant.texture, random, pen)
+  if (plant.category === 'perennial' && plant.texture !== 'coarse') return bladeStrokes(envelope, random, pen, 0.2)
+  if (isNeedled(plant)) return textureStrokes(envelope, plant.texture, random, pen)
+  return leafMasses(envelope, random, pen) + textureStrokes(envelope, plant.texture, random, pen)
 }
 
 function flowers({ placement }: Subject, look: Look, envelope: Envelope, pen: Pen): PathShape[] {
@@ -91,12 +93,13 @@ function inLeaf(subject: Subject, look: Look, envelope: Envelope, place: Place):
 function bare(subject: Subject, look: Look, envelope: Envelope, place: Place): PathShape[] {
   const { plant, placement } = subject
   const pen = penFor(place)
-  const trunk = plant.category === 'tree' && plant.habit !== 'multi-stem'
-  const { limbs, twigs } = bareBranches(envelope, trunk, randomFrom(`${placement.id} wood`), pen)
+  const single = plant.category === 'tree' && plant.habit !== 'multi-stem'
+  const { trunk, limbs, twigs } = bareBranches(envelope, single, randomFrom(`${placement.id} wood`), pen)
   const { outline } = drawSilhouette(envelope, styleOf(subject, envelope), randomFrom(placement.id), place)
   return [
-    path(outline, { fill: 'foliage-straw', opacity: 0.16 }),
+    path(outline, { fill: 'foliage-straw', opacity: 0.1 }),
     path(outline, { stroke: 'ink-soft', strokePx: 0.7, dashPx: [1, 3], opacity: 0.9 }),
+    ...(trunk ? [path(trunk, { stroke: 'bark', strokePx: 3.2, cap: 'round' as const })] : []),
     path(twigs, { stroke: 'bark', strokePx: 0.7, cap: 'round' }),
     path(limbs, { stroke: 'bark', strokePx: 1.3, cap: 'round' }),
     ...flowers(subject, look, envelope, pen),

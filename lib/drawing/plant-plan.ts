@@ -16,16 +16,21 @@ const radiusOf = (crown: Crown) => Math.max(0, reach(crown, crown.z0, crown.z0 +
 
 /** A leafy ring within a circle: every bump touches it, every notch lies inside. */
 function leafyRing(cx: number, cy: number, radius: number, random: Random): string {
-  const bumps = Math.min(34, Math.max(9, Math.round(radius * 0.75)))
-  const turn = random() * Math.PI
+  const bumps = Math.min(30, Math.max(8, Math.round(radius * 0.6)))
+  const turn = random() * 2 * Math.PI
   const at = (share: number, r: number) => {
     const angle = turn + (share / bumps) * 2 * Math.PI
     return `${num(cx + Math.cos(angle) * r)} ${num(cy + Math.sin(angle) * r)}`
   }
-  const start = at(0, radius * 0.94)
+  const inner = () => radius * (0.925 + random() * 0.05)
+  const start = at(0, inner())
+  let from = 0
   const parts = Array.from({ length: bumps }, (_, i) => {
-    const notch = i === bumps - 1 ? start : at(i + 1 + (random() - 0.5) * 0.3, radius * (0.9 + random() * 0.06))
-    return `Q${at(i + 0.22, radius * 0.995)} ${at(i + 0.5, radius * 0.995)}Q${at(i + 0.78, radius * 0.995)} ${notch}`
+    const to = i === bumps - 1 ? bumps : i + 1 + (random() - 0.5) * 0.55
+    const step = to - from
+    const bump = `Q${at(from + step * 0.2, radius * 0.995)} ${at(from + step * 0.5, radius * 0.998)}Q${at(from + step * 0.8, radius * 0.995)} ${i === bumps - 1 ? start : at(to, inner())}`
+    from = to
+    return bump
   })
   return `M${start}${parts.join('')}Z`
 }
@@ -39,8 +44,8 @@ function spokes(cx: number, cy: number, radius: number, random: Random): string 
   }).join('')
 }
 
-const FULL: Record<Dress, number> = { leaves: 0.55, thin: 0.3, bare: 0.14, dormant: 0.2 }
-const TODAY: Record<Dress, number> = { leaves: 0.85, thin: 0.5, bare: 0.3, dormant: 0.4 }
+const FULL: Record<Dress, number> = { leaves: 0.42, thin: 0.25, bare: 0.1, dormant: 0.16 }
+const TODAY: Record<Dress, number> = { leaves: 0.42, thin: 0.3, bare: 0.18, dormant: 0.25 }
 
 function growing(subject: PlanSubject, cx: number, cy: number): Shape[] {
   const { placement, plant, month } = subject

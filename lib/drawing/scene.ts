@@ -99,15 +99,21 @@ function groundOfPlan({ sheet }: SceneOptions, layout: Layout): Shape[] {
   ]
 }
 
-function keysOf(groups: readonly KeyGroup[], letters: ReadonlyMap<string, string>, spots: ReadonlyMap<string, { x: number; y: number }>, { labeler, plan }: { labeler: Labeler; plan: boolean }): Shape[] {
+interface KeySpot {
+  x: number
+  y: number
+  prefer: { x: number; y: number }[]
+}
+
+function keysOf(groups: readonly KeyGroup[], letters: ReadonlyMap<string, string>, spots: ReadonlyMap<string, KeySpot>, { labeler, plan }: { labeler: Labeler; plan: boolean }): Shape[] {
   const ties: Shape[] = []
   const keys = groups.flatMap(({ plant, members }): Shape[] => {
     const points = members.map(({ id }) => spots.get(id)!)
     if (plan && points.length > 1) ties.push(path(line(points), { stroke: 'ink', strokePx: 0.8 }))
     const middle = points[Math.floor((points.length - 1) / 2)]!
-    return labeler.setKey({ text: letters.get(plant) ?? '', at: middle, radiusPx: KEY_PX, placements: members.map(({ id }) => id), beside: plan })
+    return labeler.setKey({ text: letters.get(plant) ?? '', at: middle, radiusPx: KEY_PX, placements: members.map(({ id }) => id), beside: plan, prefer: middle.prefer })
   })
-  return [...ties, ...keys]
+  return [...ties, ...keys.filter(({ kind }) => kind === 'path'), ...keys.filter(({ kind }) => kind !== 'path')]
 }
 
 function labelPlan(options: SceneOptions, layout: Layout, labeler: Labeler, show: Required<Show>): Shape[] {
@@ -121,11 +127,20 @@ function labelPlan(options: SceneOptions, layout: Layout, labeler: Labeler, show
   ]
 }
 
-function keySpots(grown: readonly Grown[], layout: Layout, plan: boolean): Map<string, { x: number; y: number }> {
-  return new Map(grown.map(({ placement, crown, plan: drawn }) => {
-    const height = crown.z0 + crown.clearStem + (crown.height - crown.clearStem) * 0.55
-    return [placement.id, plan ? drawn.at : { x: crown.x, y: layout.elevationY(height) }]
-  }))
+/** Places in the strip below the soil, nearest to the plant first. */
+function stripSpots(x: number, layout: Layout, px: (pixels: number) => number): { x: number; y: number }[] {
+  const step = px(2 * KEY_PX + 3)
+  const sideways = [0, 0.5, -0.5, 1, -1, 1.5, -1.5, 2, -2, 2.5, -2.5, 3, -3]
+  return [0, 1].flatMap((row) => sideways.map((by) => ({ x: x + by * step, y: layout.soilEnd + px(KEY_PX + 9) + row * step })))
+}
+
+function elevationSpot({ crown }: Grown, layout: Layout, labeler: Labeler, strip: boolean): KeySpot {
+  const foot = crown.z0 + crown.clearStem
+  const top = crown.z0 + crown.height
+  const at = { x: crown.x, y: layout.elevationY(foot + (top - foot) * 0.55) }
+  const small = Math.min(top - foot, crown.spread) * layout.pxPerInch < KEY_PX * 4.4
+  if (strip) return { ...at, prefer: stripSpots(crown.x, layout, labeler.px) }
+  return { ...at, prefer: small ? [{ x: crown.x, y: layout.elevationY(top) - labeler.px(KEY_PX + 5) }] : [] }
 }
 
 function elevationTitle(options: SceneOptions): string {
@@ -137,7 +152,7 @@ function elevationTitle(options: SceneOptions): string {
 export function buildScene(options: SceneOptions): Scene {
   const { sheet, selected, finding } = options
   const show = { ...ALL, ...options.show }
-  const layout = layOut(sheet, options.pxPerInch)
+  const layout = layOut(sheet, options.pxPerInch, show.notes ? undefined : { title: 8, stripPx: show.keys ? 4 * KEY_PX + 24 : 0 })
   const plants = new Map(sheet.plants.map((plant) => [plant.id, plant]))
   const grown = sheet.placements.flatMap((placement): Grown[] => {
     const plant = plants.get(placement.plant)
@@ -153,7 +168,7 @@ export function buildScene(options: SceneOptions): Scene {
     title: 'Plan', box: layout.plan, ground: groundOfPlan(options, layout),
     plants: grown.map((one) => one.plan).sort(byDepth), limits: [], labels: labelPlan(options, layout, labelers.plan, show), highlight: [],
   }
-  if (show.labels) elevation.labels.push(titleOf(elevation.title, layout.elevation, labelers.elevation))
+  if (show.labels && show.notes) elevation.labels.push(titleOf(elevation.title, layout.elevation, labelers.elevation))
   const scene: Scene = {
     box: layout.box, pxPerInch: layout.pxPerInch, elevation, plan,
     elevationY: layout.elevationY, heightAt: layout.heightAt, planY: layout.planY, outAt: layout.outAt,
@@ -169,8 +184,8 @@ export function buildScene(options: SceneOptions): Scene {
     for (const { x, y } of grown.map((one) => one.plan.at)) labelers.plan.block({ x: x - labelers.plan.px(4), y: y - labelers.plan.px(4), width: labelers.plan.px(8), height: labelers.plan.px(8) })
     const groups = keyGroups(grown.map(({ placement }) => placement), plants)
     const letters = plantKeys(sheet)
-    elevation.labels.push(...keysOf(groups, letters, keySpots(grown, layout, false), { labeler: labelers.elevation, plan: false }))
-    plan.labels.push(...keysOf(groups, letters, keySpots(grown, layout, true), { labeler: labelers.plan, plan: true }))
+    elevation.labels.push(...keysOf(groups, letters, new Map(grown.map((one) => [one.placement.id, elevationSpot(one, layout, labelers.elevation, !show.notes)])), { labeler: labelers.elevation, plan: false }))
+    plan.labels.push(...keysOf(groups, letters, new Map(grown.map((one) => [one.placement.id, { ...one.plan.at, prefer: [] }])), { labeler: labelers.plan, plan: true }))
   }
   for (const id of new Set([selected, ...(finding?.placements ?? [])])) {
     const out = id ? sheet.placements.find((one) => one.id === id)?.y : undefined
@@ -183,7 +198,7 @@ export function buildScene(options: SceneOptions): Scene {
 }
 
 function addLimits(options: SceneOptions, layout: Layout, views: { elevation: View; plan: View }, labelers: { elevation: Labeler; plan: Labeler }): void {
-  const margins = marginsOf(options.sheet)
+  const margins = options.show?.notes === false ? { ...marginsOf(options.sheet), sill: 0, gutter: 0 } : marginsOf(options.sheet)
   const up = elevationLimits(options.sheet, layout, margins, labelers.elevation)
   const down = planLimits(options.sheet, layout, margins, labelers.plan)
   views.elevation.limits.push(...up.lines)

@@ -65,6 +65,25 @@ export function textureStrokes(envelope: Envelope, texture: Texture, random: Ran
   return parts.join('')
 }
 
+/** Masses of leaves: short rows of bumps inside the crown, open below, as one sketches a shrub. */
+export function leafMasses(envelope: Envelope, random: Random, pen: Pen): string {
+  const { bottom, top, radius, widest } = envelope
+  const count = Math.min(9, Math.max(2, Math.round(Math.sqrt(sizeOfCrown(envelope)) / 14)))
+  const parts: string[] = []
+  for (let i = 0; i < count; i += 1) {
+    const z = bottom + (top - bottom) * (0.16 + (0.68 * (i + random())) / count)
+    const size = Math.min(widest * 0.16, (top - bottom) * 0.1) * (0.8 + random() * 0.5)
+    const x = radius(z) * (random() * 1.5 - 0.85)
+    const bumps = [-1.5, -0.5, 0.5].map((at) => {
+      const lift = (spot: number) => size * (0.9 - 0.28 * spot * spot)
+      const middle = keepIn(envelope, { x: x + (at + 0.5) * size, z: z + lift(at + 0.5) + size * 0.55 })
+      return `Q${pen(middle)} ${pen(keepIn(envelope, { x: x + (at + 1) * size, z: z + lift(at + 1) }))}`
+    })
+    parts.push(`M${pen(keepIn(envelope, { x: x - 1.5 * size, z: z + size * 0.27 }))}${bumps.join('')}`)
+  }
+  return parts.join('')
+}
+
 /** Needle branches in tiers, drooping from the axis: for cones. */
 export function tierStrokes(envelope: Envelope, random: Random, pen: Pen): string {
   const { bottom, top, radius } = envelope
@@ -127,34 +146,57 @@ export function stems(envelope: Envelope, count: number, random: Random, pen: Pe
 }
 
 export interface Wood {
+  /** The single trunk of a tree; '' otherwise. */
+  trunk: string
   limbs: string
   twigs: string
 }
 
+/** Twigs off a limb, each with twigs of its own; none reaches beyond the crown or below the fork. */
+function twigsOf(envelope: Envelope, limb: [Spot, Spot, Spot], { random, pen, floor }: { random: Random; pen: Pen; floor: number }): string {
+  const many = envelope.widest > 18 ? 6 : 3
+  const parts: string[] = []
+  const shoot = (from: Spot, angle: number, long: number): Spot => {
+    const to = keepIn(envelope, { x: from.x + Math.cos(angle) * long, z: Math.max(from.z + Math.sin(angle) * long, floor) })
+    parts.push(`M${pen(from)}L${pen(to)}`)
+    return to
+  }
+  for (let i = 0; i < many; i += 1) {
+    const t = 0.34 + (0.62 * (i + random() * 0.6)) / many
+    const from = along(...limb, t)
+    const ahead = along(...limb, Math.min(1, t + 0.1))
+    const angle = Math.atan2(ahead.z - from.z, ahead.x - from.x) + (i % 2 ? 1 : -1) * (0.45 + random() * 0.4)
+    const long = (1.15 - t) * envelope.widest * 0.5 * (0.7 + random() * 0.5)
+    const end = shoot(from, angle, long)
+    if (many > 3) {
+      const middle = { x: (from.x + end.x) / 2, z: (from.z + end.z) / 2 }
+      shoot(middle, angle + 0.5 + random() * 0.3, long * 0.45)
+      shoot(middle, angle - 0.5 - random() * 0.3, long * 0.4)
+    }
+  }
+  return parts.join('')
+}
+
 /** A bare plant: limbs to the edge of the crown and twigs off them, none reaching beyond it. */
-export function bareBranches(envelope: Envelope, trunk: boolean, random: Random, pen: Pen): Wood {
+export function bareBranches(envelope: Envelope, single: boolean, random: Random, pen: Pen): Wood {
   const { crown, bottom, top } = envelope
   const limbs: string[] = []
   const twigs: string[] = []
-  const count = Math.min(15, Math.max(7, Math.round(envelope.widest / 6)))
-  const fork = trunk ? Math.max(bottom, crown.z0 + (top - crown.z0) * 0.14) : crown.z0
-  if (trunk) limbs.push(`M${pen({ x: 0, z: crown.z0 })}L${pen({ x: 0, z: fork })}`)
+  const count = Math.min(13, Math.max(7, Math.round(envelope.widest / 6)))
+  const fork = single ? Math.max(bottom, crown.z0 + (top - crown.z0) * 0.14) : crown.z0
   for (let i = 0; i < count; i += 1) {
     const way = i % 2 ? 1 : -1
-    const tip = envelope.at(0.22 + (0.76 * (i + random() * 0.8)) / count)
-    const end = { x: tip.x * way * 0.95, z: Math.max(bottom + (tip.z - bottom) * 0.97, fork) }
-    const from = { x: trunk ? 0 : way * Math.min(2.5, envelope.at(0).x * 0.2) * random(), z: fork }
-    const bend = { x: from.x + (end.x - from.x) * 0.3, z: fork + (end.z - fork) * 0.55 }
+    const tip = envelope.at(0.25 + (0.74 * (i + random() * 0.8)) / count)
+    const end = { x: tip.x * way * 0.96, z: Math.max(bottom + (tip.z - bottom) * 0.98, fork) }
+    const low = single ? fork + (end.z - fork) * 0.3 * random() : fork
+    const from = { x: single ? 0 : way * Math.min(2.5, envelope.at(0).x * 0.2) * random(), z: low }
+    const bend = { x: from.x + (end.x - from.x) * (0.25 + random() * 0.25), z: low + (end.z - low) * 0.6 }
     limbs.push(`M${pen(from)}Q${pen(bend)} ${pen(end)}`)
-    for (const t of [0.45, 0.62, 0.78, 0.9]) {
-      const at = along(from, bend, end, t)
-      const long = (1 - t * 0.6) * envelope.widest * 0.34 * (0.6 + random() * 0.5)
-      const turn = (random() < 0.5 ? -1 : 1) * (0.4 + random() * 0.5)
-      const angle = Math.atan2(end.z - bend.z, end.x - bend.x) + turn
-      twigs.push(`M${pen(at)}L${pen(keepIn(envelope, { x: at.x + Math.cos(angle) * long, z: Math.max(at.z + Math.sin(angle) * long, fork) }))}`)
-    }
+    twigs.push(twigsOf(envelope, [from, bend, end], { random, pen, floor: fork }))
   }
-  return { limbs: limbs.join(''), twigs: twigs.join('') }
+  const tall = fork + (top - fork) * 0.34
+  const trunk = single ? `M${pen({ x: 0, z: crown.z0 })}L${pen({ x: 0, z: tall })}` : ''
+  return { trunk, limbs: limbs.join(''), twigs: twigs.join('') }
 }
 
 function along(a: Spot, b: Spot, c: Spot, t: number): Spot {

@@ -109,7 +109,7 @@ export interface Show {
   labels?: boolean
   /** Plants that are to go. */
   goes?: boolean
-  /** Names of walks and beds, wording meant for the studio. */
+  /** Wording meant for the studio: titles, and limits with their margins instead of the bare sill and gutter. */
   notes?: boolean
 }
 
