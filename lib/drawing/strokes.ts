@@ -194,7 +194,7 @@ export function bareBranches(envelope: Envelope, single: boolean, random: Random
     limbs.push(`M${pen(from)}Q${pen(bend)} ${pen(end)}`)
     twigs.push(twigsOf(envelope, [from, bend, end], { random, pen, floor: fork }))
   }
-  const tall = fork + (top - fork) * 0.34
+  const tall = fork + (top - fork) * 0.1
   const trunk = single ? `M${pen({ x: 0, z: crown.z0 })}L${pen({ x: 0, z: tall })}` : ''
   return { trunk, limbs: limbs.join(''), twigs: twigs.join('') }
 }
