@@ -91,7 +91,7 @@ function Hatch({ shape, id, inch }: { shape: HatchShape; id: string; inch: numbe
         <path d={`M0 0V${step}`} stroke={colour(shape.ink)} strokeWidth={2.6 * inch} fill="none" />
       </pattern>
       <g clipPath={lastClip(id, shape.clip)}>
-        <rect x={x} y={y} width={width} height={height} fill={colour(shape.ink)} fillOpacity={0.14} />
+        <rect x={x} y={y} width={width} height={height} fill={colour('sheet')} fillOpacity={0.4} />
         <rect x={x} y={y} width={width} height={height} fill={`url(#${id}-lines)`} />
       </g>
     </>
