@@ -6,7 +6,7 @@ import type { Bed, Point, Walk } from '@/lib/spacing'
 import { LengthField } from './length-field'
 import { useFresh, useMeasure, useThing } from './measure-context'
 import { freeName, newBed, newWalk } from './new-things'
-import { ActionButton, Choice, EmptySection, FieldGrid, NameField, Row, Section, Sentence } from './parts'
+import { ActionButton, Choice, NotKept, EmptySection, FieldGrid, NameField, Row, Section } from './parts'
 import { PointRows } from './point-rows'
 
 interface OutlineProps {
@@ -67,16 +67,15 @@ const WAYS = { rectangle: 'four numbers', points: 'its corners' } as const
 
 function AreaRow({ kind, id, onCopy, onRemove }: AreaProps) {
   const { readOnly } = useMeasure()
-  const { value: area, type, choose, leave, problemAt } = useThing(kind, id)
+  const { value: area, type, choose, leave, problemAt, elsewhere, putBack } = useThing(kind, id)
   const [way, setWay] = useState<keyof typeof WAYS>('rectangle')
   const rectangle = rectangleOf(area.outline)
-  const problem = problemAt('outline')
   return (
     <Row title={area.name} onCopy={() => onCopy(area)} onRemove={() => onRemove(area)} readOnly={readOnly}>
       <FieldGrid columns={2}>
         <NameField longLabel={`${area.name}, name`} value={area.name} problem={problemAt('name')} readOnly={readOnly} onValue={(name) => type({ name })} onLeave={leave} />
-        {rectangle ? <Choice label={`${area.name} by`} value={way} choices={['rectangle', 'points']} words={WAYS} onChoice={setWay} /> : null}
       </FieldGrid>
+      {rectangle ? <Choice label={`${area.name} by`} value={way} choices={['rectangle', 'points']} words={WAYS} onChoice={setWay} /> : null}
       {rectangle && way === 'rectangle' ? (
         <RectangleFields name={area.name} rectangle={rectangle} onType={(outline) => type({ outline })} onLeave={leave} />
       ) : (
@@ -90,7 +89,7 @@ function AreaRow({ kind, id, onCopy, onRemove }: AreaProps) {
           onLeave={leave}
         />
       )}
-      {problem ? <Sentence>{problem}</Sentence> : null}
+      <NotKept messages={elsewhere} onPutBack={putBack}>{problemAt('outline')}</NotKept>
     </Row>
   )
 }

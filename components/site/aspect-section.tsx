@@ -27,7 +27,7 @@ export function AspectSection() {
   const { value: aspect, type, choose, leave, problemAt } = useThing('aspect')
   return (
     <Section id="light" title="Facing and light" lead="Stand with your back to the wall: the compass tells where it looks.">
-      <FieldGrid>
+      <FieldGrid columns={2}>
         <TypedField<number | undefined>
           label="Looks towards"
           readOnly={readOnly}

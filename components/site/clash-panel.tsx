@@ -2,10 +2,10 @@
 import { formatLength } from '@/lib/measure'
 import { useMeasure } from './measure-context'
 import { ActionButton } from './parts'
-import type { Clash, SaveState } from './saver'
+import type { Clash } from '../drawing-table/editor/clashes'
 
 interface Props {
-  state: Extract<SaveState, { kind: 'clash' }>
+  clashes: readonly Clash[]
   onTheirs: () => void
   onMine: () => void
 }
@@ -34,7 +34,7 @@ function differences({ mine, theirs }: Clash, write: (field: string, value: unkn
 }
 
 /** What someone else changed meanwhile, beside what stands here, and the choice between them. */
-export function ClashPanel({ state, onTheirs, onMine }: Props) {
+export function ClashPanel({ clashes, onTheirs, onMine }: Props) {
   const { units } = useMeasure()
   const write = (field: string, value: unknown): string => {
     if (typeof value === 'number') return PLAIN_NUMBERS.includes(field) ? String(value) : formatLength(value, units)
@@ -50,7 +50,7 @@ export function ClashPanel({ state, onTheirs, onMine }: Props) {
           <tr><th scope="col">What</th><th scope="col">Theirs</th><th scope="col">Mine</th></tr>
         </thead>
         <tbody>
-          {state.clashes.flatMap((clash) =>
+          {clashes.flatMap((clash) =>
             differences(clash, write).map((row) => (
               <tr key={clash.kind + clash.target + row.field}>
                 <td>{titleOf(clash)}: {row.field.toLowerCase()}</td>
@@ -62,7 +62,7 @@ export function ClashPanel({ state, onTheirs, onMine }: Props) {
         </tbody>
       </table>
       <div className="flex gap-2">
-        <ActionButton kind="plain" onPress={onTheirs}>Take theirs</ActionButton>
+        <ActionButton kind="plain" takesFocus onPress={onTheirs}>Take theirs</ActionButton>
         <ActionButton kind="strong" onPress={onMine}>Keep mine</ActionButton>
       </div>
     </section>

@@ -6,7 +6,7 @@ import { HeightField, HeightsChoice } from './heights'
 import { LengthField, OptionalLengthField } from './length-field'
 import { useFresh, useMeasure, useThing } from './measure-context'
 import { newFixture } from './new-things'
-import { ActionButton, ChoiceField, Elsewhere, EmptySection, FieldGrid, Row, Section } from './parts'
+import { ActionButton, ChoiceField, NotKept, EmptySection, FieldGrid, Row, Section } from './parts'
 
 export const FIXTURE_WORDS: Record<Fixture['kind'], string> = {
   'electric-meter': 'Electric meter', 'gas-meter': 'Gas meter', condenser: 'Condenser', 'hose-bib': 'Hose bib', vent: 'Vent',
@@ -15,7 +15,7 @@ export const FIXTURE_WORDS: Record<Fixture['kind'], string> = {
 
 function FixtureRow({ id, count, onCopy, onRemove }: { id: string; count: number; onCopy: (fixture: Fixture) => void; onRemove: (fixture: Fixture) => void }) {
   const { units, readOnly, state } = useMeasure()
-  const { value: fixture, type, choose, leave, problemAt, elsewhere } = useThing('fixture', id)
+  const { value: fixture, type, choose, leave, problemAt, elsewhere, putBack } = useThing('fixture', id)
   const title = `${count}. ${FIXTURE_WORDS[fixture.kind]}`
   const soil = groundAt(state.shown.facade, fixture.x + fixture.width / 2, fixture.y + fixture.depth)
   const length = (label: string, field: 'x' | 'y' | 'width' | 'depth' | 'height') => (
@@ -46,7 +46,7 @@ function FixtureRow({ id, count, onCopy, onRemove }: { id: string; count: number
         <HeightField label="Lower edge" longLabel={`${title}, lower edge`} value={fixture.z} soil={soil} problem={problemAt('z')} onValue={(z) => type({ z })} onLeave={leave} />
         {length('Height of it', 'height')}
       </FieldGrid>
-      <Elsewhere messages={elsewhere} />
+      <NotKept messages={elsewhere} onPutBack={putBack} />
     </Row>
   )
 }

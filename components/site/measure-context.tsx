@@ -51,6 +51,8 @@ export interface ThingForm<K extends Thing['kind']> {
   problemAt: (...path: (string | number)[]) => string | null
   /** What keeping this thing would break elsewhere. */
   elsewhere: string[]
+  /** Drops what is typed and cannot be kept; null when nothing waits. */
+  putBack: (() => void) | null
 }
 
 function keptValue(sheet: Sheet, kind: Thing['kind'], id: string | null): Thing['value'] {
@@ -79,6 +81,7 @@ export function useThing<K extends Thing['kind']>(kind: K, id: string | null = n
     leave: measuring.leave,
     problemAt: (...path) => problems.find((problem) => problem.path.join('.') === [...start, ...path].join('.'))?.message ?? null,
     elsewhere: problems.filter((problem) => !startsWith(problem, start)).map(({ message }) => message),
+    putBack: draft && problems.length > 0 ? () => measuring.drop(draft.thing) : null,
   }
 }
 

@@ -8,6 +8,8 @@ import {
   problemsOf, targetOf, walkSchema, type Edit, type EditKind, type ListedKind, type Problem, type ValueOf,
 } from '@/lib/sheet'
 import type { Sheet } from '@/lib/spacing'
+import { isSameThing, keyOfEdit, thingOn } from '../drawing-table/editor/things'
+import type { WaitingEdit } from '../drawing-table/editor/queue-store'
 
 export type MeasuredKind = Exclude<EditKind, 'placement'>
 /** One whole thing with the values typed into it. */
@@ -43,10 +45,7 @@ export const LIST_NAMES = { opening: 'openings', fixture: 'fixtures', walk: 'wal
 const PAST_KEPT = 200
 
 const editOf = (thing: Thing, id: string): Edit => ({ id, op: 'put', ...thing }) as Edit
-const keyOf = (thing: Thing): string => {
-  const { kind, target } = targetOf(editOf(thing, ''))
-  return `${kind}:${target}`
-}
+const keyOf = (thing: Thing): string => keyOfEdit(editOf(thing, ''))
 
 /** What a thing is called in a sentence. */
 export function nameOf(thing: Thing): string {
@@ -84,14 +83,21 @@ export function problemsWith(sheet: Sheet, thing: Thing): Problem[] {
   return findProblems(applyEdit(sheet, editOf(thing, ''))).filter((problem) => !known.has(JSON.stringify(problem)))
 }
 
-const isSame = (sheet: Sheet, thing: Thing) => {
-  const next = applyEdit(sheet, editOf(thing, ''))
-  return JSON.stringify(next) === JSON.stringify(sheet)
+const isKept = (sheet: Sheet, thing: Thing) => isSameThing(thingOn(sheet, targetOf(editOf(thing, ''))), thing.value)
+
+/** Edits with the things they touch as they stood before each: what the save queue takes. */
+function withBefore(sheet: Sheet, edits: readonly Edit[]): WaitingEdit[] {
+  let now = sheet
+  return edits.map((edit) => {
+    const before = thingOn(now, targetOf(edit))
+    now = applyEdit(now, edit)
+    return { edit, before }
+  })
 }
 
 interface Options {
   /** Takes the edits that are to be saved. */
-  send: (edits: Edit[]) => void
+  send: (edits: WaitingEdit[]) => void
   newId: () => string
 }
 
@@ -122,8 +128,15 @@ export class Measuring {
   /** A field holds a readable value: the drawing follows where the thing is sound. */
   readonly type = (thing: Thing) => {
     const drafts = new Map(this.state.drafts)
-    if (isSame(this.state.sheet, thing)) drafts.delete(keyOf(thing))
+    if (isKept(this.state.sheet, thing)) drafts.delete(keyOf(thing))
     else drafts.set(keyOf(thing), { thing, problems: [] })
+    this.set({ drafts })
+  }
+
+  /** Forgets what is typed into a thing. */
+  readonly drop = (thing: Thing) => {
+    const drafts = new Map(this.state.drafts)
+    drafts.delete(keyOf(thing))
     this.set({ drafts })
   }
 
@@ -155,6 +168,7 @@ export class Measuring {
   }
 
   private commit(forward: Edit[], label: string, drafts: MeasuringState['drafts']) {
+    const waiting = withBefore(this.state.sheet, forward)
     const back: Edit[] = []
     let sheet = this.state.sheet
     for (const edit of forward) {
@@ -164,7 +178,7 @@ export class Measuring {
     }
     const past = [...this.state.past, { label, forward, back }].slice(-PAST_KEPT)
     this.set({ sheet, drafts, past, future: [], said: label })
-    this.options.send(forward)
+    this.options.send(waiting)
   }
 
   /** Takes the last step back, as edits of its own. What is typed and waits in other things stays. */
@@ -180,12 +194,32 @@ export class Measuring {
 
   private replay(edits: readonly Edit[], next: Partial<MeasuringState>) {
     const fresh = edits.map((edit) => ({ ...edit, id: this.options.newId() }))
-    const touched = new Set(fresh.map(targetOf).map(({ kind, target }) => `${kind}:${target}`))
+    const waiting = withBefore(this.state.sheet, fresh)
+    const touched = new Set(fresh.map(keyOfEdit))
     const drafts = new Map([...this.state.drafts].filter(([key]) => !touched.has(key)))
     this.set({ ...next, sheet: applyEdits(this.state.sheet, fresh), drafts })
-    this.options.send(fresh)
+    this.options.send(waiting)
   }
 
-  /** Takes over a sheet the server holds. Steps made here could undo what others did, so they are forgotten. */
-  readonly adopt = (sheet: Sheet, said: string) => this.set({ sheet, drafts: new Map(), past: [], future: [], said })
+  /**
+   * Takes over a sheet that came from the server. What is typed stays where the thing under it did not change; steps made
+   * here could undo what others did, so they are forgotten when anything changed.
+   */
+  readonly adopt = (sheet: Sheet, said: string | null) => {
+    const before = this.state.sheet
+    const isChanged = ({ thing }: Draft) => {
+      const target = targetOf(editOf(thing, ''))
+      return !isSameThing(thingOn(before, target), thingOn(sheet, target))
+    }
+    const drafts = new Map([...this.state.drafts].filter(([, draft]) => !isChanged(draft)))
+    const steps = isSameThing(before, sheet) ? {} : { past: [], future: [] }
+    this.set({ sheet, drafts, ...steps, said: said ?? this.state.said })
+  }
+
+  /** Takes back what the server refused, quietly: it was never on the sheet. */
+  readonly withdraw = ({ edit, before }: WaitingEdit, message: string) => {
+    const { kind, target } = targetOf(edit)
+    const back = before === null ? { id: '', op: 'remove', kind, target } : { id: '', op: 'put', kind, value: before }
+    this.adopt(applyEdit(this.state.sheet, back as Edit), `Refused and taken back: ${message}`)
+  }
 }

@@ -5,13 +5,13 @@ import { HeightField, HeightsChoice } from './heights'
 import { LengthField } from './length-field'
 import { useFresh, useMeasure, useThing } from './measure-context'
 import { copyOfOpening, newOpening } from './new-things'
-import { ActionButton, ChoiceField, Elsewhere, EmptySection, FieldGrid, NameField, Row, Section } from './parts'
+import { ActionButton, ChoiceField, NotKept, EmptySection, FieldGrid, NameField, Row, Section } from './parts'
 
 const KIND_WORDS = { window: 'Window', door: 'Door' } as const
 
 function OpeningRow({ id, onCopy, onRemove }: { id: string; onCopy: (opening: Opening) => void; onRemove: (opening: Opening) => void }) {
   const { units, readOnly, state } = useMeasure()
-  const { value: opening, type, choose, leave, problemAt, elsewhere } = useThing('opening', id)
+  const { value: opening, type, choose, leave, problemAt, elsewhere, putBack } = useThing('opening', id)
   const { name, x, width } = opening
   const soil = gradeAt(state.shown.facade, x + width / 2)
   const shared = { units, readOnly, onLeave: leave }
@@ -27,7 +27,7 @@ function OpeningRow({ id, onCopy, onRemove }: { id: string; onCopy: (opening: Op
         <HeightField label="Sill" longLabel={`${name}, sill`} value={opening.sill} soil={soil} problem={problemAt('sill')} onValue={(sill) => type({ sill })} onLeave={leave} />
         <HeightField label="Head" longLabel={`${name}, head`} value={opening.head} soil={soil} problem={problemAt('head')} onValue={(head) => type({ head })} onLeave={leave} />
       </FieldGrid>
-      <Elsewhere messages={elsewhere} />
+      <NotKept messages={elsewhere} onPutBack={putBack} />
     </Row>
   )
 }

@@ -6,7 +6,7 @@ import { TypedField } from './typed-field'
 /** A part of the form with its heading; `id` is its address in the page. */
 export function Section({ id, title, lead, children }: { id: string; title: string; lead: string; children: ReactNode }) {
   return (
-    <section id={id} aria-labelledby={`${id}-title`} className="scroll-mt-20 rounded-sm border border-rule bg-sheet p-4">
+    <section id={id} aria-labelledby={`${id}-title`} className="scroll-mt-28 rounded-sm border border-rule bg-sheet p-4">
       <h2 id={`${id}-title`} tabIndex={-1} className="font-heading text-2xl outline-none">{title}</h2>
       <p className="mb-3 max-w-prose text-ink-soft">{lead}</p>
       {children}
@@ -82,19 +82,22 @@ interface ActionProps {
   /** Full name where the visible word is short. */
   label?: string
   isDisabled?: boolean
+  /** Takes the focus when it appears: for questions that stop the work. */
+  takesFocus?: boolean
   onPress: () => void
   children: ReactNode
 }
 
-export function ActionButton({ kind, label, isDisabled, onPress, children }: ActionProps) {
+export function ActionButton({ kind, label, isDisabled, takesFocus, onPress, children }: ActionProps) {
   return (
     <button
       type="button"
+      autoFocus={takesFocus}
       aria-label={label}
       // Not `disabled`: the focus stays where it is when the last step is taken back.
       aria-disabled={isDisabled}
       onClick={isDisabled ? undefined : onPress}
-      className={`min-h-11 min-w-11 rounded-sm px-3 focus-visible:outline-2 focus-visible:outline-offset-1 focus-visible:outline-leaf aria-disabled:border-rule aria-disabled:text-ink-soft ${BUTTONS[kind]}`}
+      className={`min-h-11 min-w-11 rounded-sm px-3 whitespace-nowrap focus-visible:outline-2 focus-visible:outline-offset-1 focus-visible:outline-leaf aria-disabled:border-rule aria-disabled:text-ink-soft ${BUTTONS[kind]}`}
     >
       {children}
     </button>
@@ -166,18 +169,24 @@ export function NameField(props: NameProps) {
   return <TypedField<string> {...props} label="Name" read={(text) => ({ ok: true, value: text })} write={(name) => name} />
 }
 
-/** What is wrong with a whole thing, in a sentence. */
-export function Sentence({ children }: { children: ReactNode }) {
-  return <p role="alert" className="mt-2 border-l-4 border-conflict pl-3 text-conflict">{children}</p>
+interface WaitingProps {
+  /** What keeping the change would break in other parts of the sheet. */
+  messages: readonly string[]
+  /** Brings back what is kept; null when nothing waits. */
+  onPutBack: (() => void) | null
+  /** What is wrong with the thing as a whole. */
+  children?: string | null
 }
 
-/** What keeping a change would break in other parts of the sheet. */
-export function Elsewhere({ messages }: { messages: readonly string[] }) {
-  if (messages.length === 0) return null
+/** Says that a thing as typed is not kept yet, why where no field says it, and offers what is kept. */
+export function NotKept({ messages, onPutBack, children }: WaitingProps) {
+  if (!onPutBack) return null
+  const reasons = [...new Set([...(children ? [children] : []), ...messages])]
   return (
-    <Sentence>
-      Not kept yet: {[...new Set(messages)].join(' ')}
-    </Sentence>
+    <div role="status" className="mt-2 flex flex-wrap items-center justify-between gap-2 border-l-4 border-conflict pl-3 text-conflict">
+      <p>Not kept yet{reasons.length > 0 ? `: ${reasons.join(' ')}` : ': see the field marked above.'}</p>
+      <ActionButton kind="quiet" onPress={onPutBack}>Put back what was kept</ActionButton>
+    </div>
   )
 }
 

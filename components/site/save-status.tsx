@@ -1,31 +1,32 @@
 'use client'
+import { saveLabel } from '../drawing-table/editor/save-label'
+import type { SaveState } from '../drawing-table/editor/save-queue'
 import { ActionButton } from './parts'
-import type { SaveState } from './saver'
 
-const clock = new Intl.DateTimeFormat('en-GB', { hour: '2-digit', minute: '2-digit' })
-
-/** How saving stands, always in sight: saved and when, saving, or not saved and why. */
-export function SaveStatus({ state, waitingFields, onRetry }: { state: SaveState; waitingFields: number; onRetry: () => void }) {
-  return (
-    <div className="flex flex-wrap items-center gap-2">
-      <p role="status" aria-live="polite">
-        {sentence(state)}
-        {waitingFields > 0 ? <span className="text-conflict"> {waitingFields === 1 ? 'One thing waits' : `${waitingFields} things wait`} for a field to be put right.</span> : null}
-      </p>
-      {state.kind === 'not-saved' ? <ActionButton kind="plain" onPress={onRetry}>Try again</ActionButton> : null}
-    </div>
-  )
+interface Props {
+  state: SaveState
+  /** Things that are typed and cannot be kept yet. */
+  waitingThings: number
+  onRetry: () => void
+  onDismiss: () => void
 }
 
-function sentence(state: SaveState): string {
-  switch (state.kind) {
-    case 'saved':
-      return state.at === null ? 'All saved' : `Saved ${clock.format(state.at)}`
-    case 'saving':
-      return 'Saving'
-    case 'not-saved':
-      return `Not saved: ${state.message}`
-    case 'clash':
-      return 'Not saved: someone else changed the same thing.'
-  }
+const reasonOf = ({ phase, refusals }: SaveState): string | null =>
+  phase.kind === 'waiting' || phase.kind === 'stopped' ? phase.message : phase.kind === 'refused' ? refusals.join(' ') : null
+
+/** How saving stands, always in sight: saved and when, saving, or not saved and why. */
+export function SaveStatus({ state, waitingThings, onRetry, onDismiss }: Props) {
+  const { kind } = state.phase
+  const reason = reasonOf(state)
+  return (
+    <div className="flex flex-wrap items-center gap-2">
+      <p role="status">
+        {saveLabel(state)}
+        {reason ? `. ${reason}` : null}
+        {waitingThings > 0 ? <span className="text-conflict"> {waitingThings === 1 ? 'One thing is' : `${waitingThings} things are`} not kept: see the marked fields.</span> : null}
+      </p>
+      {kind === 'waiting' || kind === 'stopped' || kind === 'signed-out' ? <ActionButton kind="plain" onPress={onRetry}>Try again</ActionButton> : null}
+      {kind === 'refused' ? <ActionButton kind="plain" onPress={onDismiss}>I have read it</ActionButton> : null}
+    </div>
+  )
 }

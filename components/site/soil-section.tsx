@@ -1,7 +1,17 @@
 'use client'
+import { parseLength } from '@/lib/measure'
 import { LengthField } from './length-field'
 import { useMeasure, useThing } from './measure-context'
 import { ActionButton, FieldGrid, RowTable, Section } from './parts'
+import { TypedField, type Read } from './typed-field'
+
+const decimals = (value: number) => Number(value.toFixed(3))
+
+/** The drop over one foot, in any form of a length, as inches per inch. */
+function readFall(text: string): Read<number> {
+  const drop = parseLength(text.replace(/(\/|\bper\b|\ba\b)\s*(foot|ft)\s*$/i, ''))
+  return drop.ok ? { ok: true, value: drop.inches / 12 } : drop
+}
 
 /** Heights of the soil along the wall, and how fast it falls away. */
 export function SoilSection() {
@@ -36,15 +46,16 @@ export function SoilSection() {
       </RowTable>
       {readOnly ? null : <ActionButton kind="plain" onPress={addPoint}>Add a soil point</ActionButton>}
       <FieldGrid>
-        <LengthField
-          label="Fall away from the wall, per foot"
-          units={units}
+        <TypedField<number>
+          label="Fall in inches per foot"
           readOnly={readOnly}
-          value={facade.fall * 12}
+          value={facade.fall}
+          read={readFall}
+          write={(fall) => `${decimals(fall * 12)} in`}
+          echo={(fall) => (fall < 0 ? `the soil rises ${decimals(fall * -100)} %: water runs to the wall` : `the soil drops ${decimals(fall * 100)} %`)}
           problem={problemAt('fall')}
-          also={(inches) => `${Math.round(Math.abs(inches / 12) * 1000) / 10} % ${inches < 0 ? 'up, towards the house' : 'down'}`}
-          hint="minus where the soil rises"
-          onValue={(inches) => type({ fall: inches / 12 })}
+          hint="away from the wall"
+          onValue={(fall) => type({ fall })}
           onLeave={leave}
         />
       </FieldGrid>

@@ -1,23 +1,28 @@
 /** The form's store: what is impossible waits with its reason and changes nothing; what is sound is kept and can be undone. */
 import { beforeEach, describe, expect, test } from 'vitest'
 import { Measuring, type Thing } from '@/components/site/measuring'
-import type { Edit } from '@/lib/sheet'
+import { applyEdit, type Edit } from '@/lib/sheet'
+import type { WaitingEdit } from '@/components/drawing-table/editor/queue-store'
 import { sampleSheet } from '../../lib/sheet/sample'
 
 let sent: Edit[]
+let waiting: WaitingEdit[]
 let measuring: Measuring
 beforeEach(() => {
   let count = 0
   sent = []
   measuring = new Measuring(sampleSheet(), {
-    send: (edits) => sent.push(...edits),
+    send: (edits) => {
+      waiting = edits
+      sent.push(...edits.map(({ edit }) => edit))
+    },
     newId: () => `0b0e6d2e-0000-4000-8000-${String((count += 1)).padStart(12, '0')}`,
   })
 })
 
 const kitchen = (change: object): Extract<Thing, { kind: 'opening' }> => ({ kind: 'opening', value: { ...sampleSheet().openings[0]!, ...change } })
 const front = (change: object): Thing => ({ kind: 'facade', value: { ...sampleSheet().facade, ...change } })
-const waiting = () => [...measuring.getState().drafts.values()].flatMap(({ problems }) => problems.map(({ path, message }) => `${path.join('.')}: ${message}`))
+const reasons = () => [...measuring.getState().drafts.values()].flatMap(({ problems }) => problems.map(({ path, message }) => `${path.join('.')}: ${message}`))
 
 describe('while somebody types', () => {
   test('the drawing follows and nothing is kept or sent', () => {
@@ -32,17 +37,17 @@ describe('while somebody types', () => {
     measuring.leave()
     expect(measuring.getState().shown).toEqual(sampleSheet())
     expect(sent).toEqual([])
-    expect(waiting()).toEqual(['openings.0.sill: The sill must be below the head.'])
+    expect(reasons()).toEqual(['openings.0.sill: The sill must be below the head.'])
   })
 
   test('a width of 0 is refused at the width', () => {
     measuring.type(kitchen({ width: 0 }))
-    expect(waiting()).toEqual(['openings.0.width: Width must be more than 0.'])
+    expect(reasons()).toEqual(['openings.0.width: Width must be more than 0.'])
   })
 
   test('a wall made shorter than its windows reach is refused, naming the window', () => {
     measuring.type(front({ wall: [{ x: 0, y: 0 }, { x: 100, y: 0 }], grade: [{ x: 0, z: 0 }] }))
-    expect(waiting()).toContain('openings.0.width: Kitchen runs beyond the right corner of the wall.')
+    expect(reasons()).toContain('openings.0.width: Kitchen runs beyond the right corner of the wall.')
   })
 })
 
@@ -104,7 +109,7 @@ describe('undo', () => {
     measuring.remove({ kind: 'bed', value: sampleSheet().beds[0]! })
     measuring.type(kitchen({ sill: 95 }))
     measuring.undo()
-    expect(waiting()).toHaveLength(1)
+    expect(reasons()).toHaveLength(1)
   })
 
   test('with nothing to take back does nothing', () => {
@@ -119,9 +124,43 @@ test('a thing that is not sound cannot be put', () => {
   expect(sent).toEqual([])
 })
 
-test('a sheet taken over from the server replaces all, and what others did cannot be undone from here', () => {
-  measuring.remove(kitchen({}))
-  measuring.adopt(sampleSheet(), 'Theirs taken')
-  expect(measuring.getState().shown).toEqual(sampleSheet())
-  expect(measuring.getState().past).toEqual([])
+test('each edit goes out with the thing as it stood before', () => {
+  measuring.type(kitchen({ sill: 44 }))
+  measuring.leave()
+  expect(waiting.map(({ before }) => before)).toEqual([sampleSheet().openings[0]])
+  measuring.put({ kind: 'bed', value: { ...sampleSheet().beds[0]!, id: 'b2' } })
+  expect(waiting.map(({ before }) => before)).toEqual([null])
+})
+
+describe('a sheet from the server', () => {
+  const theirs = applyEdit(sampleSheet(), { id: '', op: 'put', kind: 'opening', value: { ...sampleSheet().openings[0]!, name: 'Bay' } })
+
+  test('is taken over, and what others did cannot be undone from here', () => {
+    measuring.remove(kitchen({}))
+    measuring.adopt(theirs, 'Theirs taken')
+    expect(measuring.getState().shown).toEqual(theirs)
+    expect(measuring.getState().past).toEqual([])
+  })
+
+  test('that is the same leaves the steps as they are', () => {
+    measuring.type(kitchen({ sill: 44 }))
+    measuring.leave()
+    measuring.adopt(structuredClone(measuring.getState().sheet), null)
+    expect(measuring.getState().past).toHaveLength(1)
+  })
+
+  test('leaves what is typed into things the others did not touch', () => {
+    measuring.type(front({ gutter: -50 }))
+    measuring.type(kitchen({ sill: 95 }))
+    measuring.adopt(theirs, null)
+    expect([...measuring.getState().drafts.keys()]).toEqual(['facade:single'])
+  })
+})
+
+test('what the server refuses is taken back, with its reason', () => {
+  measuring.type(kitchen({ sill: 44 }))
+  measuring.leave()
+  measuring.withdraw(waiting[0]!, 'The sill is not right.')
+  expect(measuring.getState().sheet).toEqual(sampleSheet())
+  expect(measuring.getState().said).toContain('The sill is not right.')
 })

@@ -1,0 +1,66 @@
+'use client'
+/** Ties the store of the form to the save queue, for the life of one page. */
+import { useEffect, useState } from 'react'
+import { v7 as newId } from 'uuid'
+import { applyEdits } from '@/lib/sheet'
+import type { Sheet } from '@/lib/spacing'
+import { MemoryQueueStore, type WaitingEdit } from '../drawing-table/editor/queue-store'
+import type { Clock } from '../drawing-table/editor/save-calls'
+import { SaveQueue } from '../drawing-table/editor/save-queue'
+import { IdbQueueStore, lockWatch } from '../drawing-table/editor/save-queue-idb'
+import { Measuring } from './measuring'
+import { sheetCalls } from './sheet-calls'
+
+export interface Opened {
+  facade: { id: string; name: string }
+  sheet: Sheet
+  seq: number
+  readOnly: boolean
+}
+
+const clock: Clock = {
+  now: () => Date.now(),
+  after: (ms, callback) => {
+    const timer = setTimeout(callback, ms)
+    return () => clearTimeout(timer)
+  },
+}
+
+const over = (sheet: Sheet, waiting: readonly WaitingEdit[]) => applyEdits(sheet, waiting.map(({ edit }) => edit))
+
+function openSheet({ facade, sheet, seq }: Opened) {
+  const editor = newId()
+  const watch = lockWatch()
+  const hasStore = typeof indexedDB !== 'undefined'
+  const measuring = new Measuring(sheet, { send: (edits) => queue.push(edits), newId })
+  const queue = new SaveQueue({
+    facade: facade.id,
+    editor,
+    base: seq,
+    store: hasStore ? new IdbQueueStore(watch, clock.now) : new MemoryQueueStore(),
+    calls: sheetCalls(facade.id),
+    clock,
+    events: {
+      saved: () => {},
+      refused: (edit, message) => measuring.withdraw(edit, message),
+      served: (served, rest, dropped) => measuring.adopt(over(served.sheet, rest), dropped.length > 0 ? 'Theirs taken' : null),
+    },
+  })
+  return { measuring, queue, editor, watch }
+}
+
+/** The store and the queue of a facade; in the browser also what an earlier page left unsent. */
+export function useSavedSheet(opened: Opened): { measuring: Measuring; queue: SaveQueue } {
+  const [{ measuring, queue, editor, watch }] = useState(() => openSheet(opened))
+  const { readOnly } = opened
+  useEffect(() => {
+    if (readOnly) return
+    void watch.take(editor)
+    void queue.restore().then((left) => {
+      if (left.length > 0) measuring.adopt(over(measuring.getState().sheet, left), 'Brought back what waited on this device')
+    })
+    window.addEventListener('online', queue.wake)
+    return () => window.removeEventListener('online', queue.wake)
+  }, [readOnly, queue, measuring, watch, editor])
+  return { measuring, queue }
+}
