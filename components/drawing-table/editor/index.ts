@@ -1,0 +1,13 @@
+/** The editor's door for the panels and the canvas around it. */
+export * from './announce'
+export * from './commands'
+export * from './desk'
+export * from './drag-session'
+export * from './hit'
+export * from './placing'
+export * from './queue-store'
+export * from './save-calls'
+export * from './save-label'
+export { SaveQueue, type Clash, type SavePhase, type SaveState } from './save-queue'
+export * from './store'
+export * from './view'
