@@ -140,8 +140,8 @@ CREATE TABLE `plants` (
 	CONSTRAINT "plants_spread" CHECK(0 < "plants"."spread_min_in" and "plants"."spread_min_in" <= "plants"."spread_max_in")
 );
 --> statement-breakpoint
-CREATE UNIQUE INDEX `plants_name` ON `plants` (`coalesce("studio_id"`,` '')`,`botanical`);--> statement-breakpoint
-CREATE INDEX `plants_studio` ON `plants` (`studio_id`);--> statement-breakpoint
+CREATE UNIQUE INDEX `plants_shared_name` ON `plants` (`botanical`) WHERE "plants"."studio_id" is null;--> statement-breakpoint
+CREATE UNIQUE INDEX `plants_studio_name` ON `plants` (`studio_id`,`botanical`);--> statement-breakpoint
 CREATE TABLE `beds` (
 	`id` text NOT NULL,
 	`facade_id` text NOT NULL,

@@ -45,8 +45,8 @@ export const plants = sqliteTable(
     createdAt: createdAt(),
   },
   (t) => [
-    uniqueIndex('plants_name').on(sql`coalesce(${t.studioId}, '')`, t.botanical),
-    index('plants_studio').on(t.studioId),
+    uniqueIndex('plants_shared_name').on(t.botanical).where(sql`${t.studioId} is null`),
+    uniqueIndex('plants_studio_name').on(t.studioId, t.botanical),
     check('plants_height', sql`0 < ${t.heightMin} and ${t.heightMin} <= ${t.heightMax}`),
     check('plants_spread', sql`0 < ${t.spreadMin} and ${t.spreadMin} <= ${t.spreadMax}`),
   ],
