@@ -3,7 +3,7 @@
 import { useMemo, useRef, useSyncExternalStore, type RefObject } from 'react'
 import { SceneSvg } from '@/components/drawing/scene-svg'
 import { buildScene, type Box, type Scene } from '@/lib/drawing'
-import { SEASON_MONTHS, SEASON_WORDS, hrefOf, yearWords, type Shown } from './view-state'
+import { SEASON_MONTHS, hrefOf, seasonWords, yearWords, type Shown } from './view-state'
 import type { ClientFacade } from './types'
 
 /** A phone's width less its margins: what the drawing is laid out for until the true width is known. */
@@ -56,10 +56,12 @@ export function FacadeDrawing({ facade, index, shown, onPart }: Props) {
     const probe = buildScene({ ...options, show: { ...options.show, keys: false, limits: false } })
     const count = partsOf(probe)
     const chosen = facadeAt === index && partAt !== undefined && partAt < count ? partAt : null
-    const window = chosen === null ? probe.elevation.box : partBox(probe.elevation.box, chosen, count)
-    return { scene: buildScene({ ...options, pxPerInch: width / window.width }), box: window, parts: count, part: chosen }
+    const wide = chosen === null ? probe.elevation.box.width : partBox(probe.elevation.box, chosen, count).width
+    const drawn = buildScene({ ...options, pxPerInch: width / wide })
+    const whole = drawn.elevation.box
+    return { scene: drawn, box: chosen === null ? whole : partBox(whole, chosen, count), parts: count, part: chosen }
   }, [facade.sheet, shown.year, month, width, facadeAt, partAt, index])
-  const when = `${yearWords(shown.year)}, ${SEASON_WORDS[shown.season].toLowerCase()}`
+  const when = `${yearWords(shown.year)}, ${seasonWords(shown)}`
   return (
     <div ref={holder}>
       <SceneSvg

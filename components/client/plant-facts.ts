@@ -18,12 +18,15 @@ export interface PlantFacts {
 
 const MONTHS = ['January', 'February', 'March', 'April', 'May', 'June', 'July', 'August', 'September', 'October', 'November', 'December']
 
+/** Keeps a figure and its unit on one line. */
+const NBSP = '\u00a0'
+
 /** A length as one says it over a fence: `15 in`, `4 ft`, `6 ft 6 in`; from 2 ft to the nearest 3 in. */
 export function aboutLength(inches: number): string {
-  if (inches < 23.5) return `${Math.max(1, Math.round(inches))} in`
+  if (inches < 23.5) return `${Math.max(1, Math.round(inches))}${NBSP}in`
   const rounded = Math.round(inches / 3) * 3
   const [feet, rest] = [Math.floor(rounded / 12), rounded % 12]
-  return rest === 0 ? `${feet} ft` : `${feet} ft ${rest} in`
+  return rest === 0 ? `${feet}${NBSP}ft` : `${feet}${NBSP}ft ${rest}${NBSP}in`
 }
 
 /** Months in order as words: `May and June`, `June to September`; months apart are listed. */

@@ -1,7 +1,7 @@
 'use client'
 
 import { useId, useSyncExternalStore } from 'react'
-import { LAST_YEAR, LINKED_YEARS, SEASONS, SEASON_WORDS, TENTH, hrefOf, yearWords, type Season, type Shown } from './view-state'
+import { LAST_YEAR, LINKED_YEARS, SEASONS, SEASON_WORDS, TENTH, hrefOf, seasonWords, yearWords, type Season, type Shown } from './view-state'
 
 interface Props {
   shown: Shown
@@ -26,17 +26,21 @@ export function TimeControls({ shown, onChange }: Props) {
   )
 }
 
+function YearTitle({ shown }: { shown: Shown }) {
+  return <><span className="font-heading text-xl">{yearWords(shown.year)}</span> <span className="text-ink-soft">{seasonWords(shown)}</span></>
+}
+
 function YearLinks({ shown }: { shown: Shown }) {
   return (
     <nav aria-label="Year" className="min-h-24">
-      <p className="font-heading text-xl">{yearWords(shown.year)}</p>
+      <p><YearTitle shown={shown} /></p>
       <ul className="flex justify-between">
         {LINKED_YEARS.map((year) => (
           <li key={year}>
             <a
               href={hrefOf({ ...shown, year })}
               aria-current={year === shown.year ? 'true' : undefined}
-              className="inline-flex min-h-11 min-w-11 items-center justify-center px-2 underline decoration-rule decoration-2 underline-offset-4 aria-[current]:font-bold aria-[current]:decoration-leaf"
+              className="inline-flex min-h-14 min-w-11 items-center justify-center px-2 underline decoration-rule decoration-2 underline-offset-4 aria-[current]:font-bold aria-[current]:decoration-leaf"
             >
               {year === 0 ? 'Planted' : `Year ${year}`}
             </a>
@@ -54,13 +58,13 @@ function YearSlider({ shown, onChange }: Props) {
   const go = (year: number) => onChange({ ...shown, year: Math.min(LAST_YEAR, Math.max(0, year)) })
   return (
     <div className="min-h-24">
-      <label htmlFor={id} className="font-heading text-xl" aria-live="polite">{yearWords(shown.year)}</label>
+      <label htmlFor={id}><YearTitle shown={shown} /></label>
       <div className="flex items-center gap-3">
         <button type="button" className={STEP} aria-label="One year earlier" disabled={shown.year === 0} onClick={() => go(shown.year - 1)}>−</button>
         <div className="min-w-0 grow">
           <input
             id={id} type="range" min={0} max={LAST_YEAR} step={1} value={shown.year}
-            aria-valuetext={yearWords(shown.year)}
+            aria-valuetext={`${yearWords(shown.year)}, ${seasonWords(shown)}`}
             className="block h-11 w-full accent-leaf"
             onChange={(event) => go(event.target.valueAsNumber)}
           />

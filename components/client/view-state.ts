@@ -40,7 +40,10 @@ export function hrefOf({ year, season, part }: Shown): `?${string}` {
 
 /** The year as people say it. */
 export function yearWords(year: number): string {
-  if (year === 0) return 'The day it is planted'
-  if (year === TENTH) return 'Its tenth summer'
-  return `After ${year} ${year === 1 ? 'year' : 'years'}`
+  return year === 0 ? 'Planting day' : `Year ${year}`
+}
+
+/** What season it is then: `its tenth summer`, `summer`. */
+export function seasonWords({ year, season }: Pick<Shown, 'year' | 'season'>): string {
+  return year === TENTH ? `its tenth ${season}` : season
 }

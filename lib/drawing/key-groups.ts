@@ -11,17 +11,19 @@ export interface KeyGroup {
 const isTied = (a: Placement, b: Placement, spread: number) =>
   (a.drift !== undefined && a.drift === b.drift) || Math.hypot(a.x - b.x, a.y - b.y) <= spread * 1.35
 
+/** Takes out of `waiting` what is tied to one placement. */
+function takeTied(waiting: Placement[], to: Placement, spread: number): Placement[] {
+  const tied = waiting.filter((one) => isTied(to, one, spread))
+  for (const one of tied) waiting.splice(waiting.indexOf(one), 1)
+  return tied
+}
+
 function groupsOf(placements: readonly Placement[], spread: number): Placement[][] {
   const waiting = [...placements].sort((a, b) => a.x - b.x || a.y - b.y || (a.id < b.id ? -1 : 1))
   const groups: Placement[][] = []
   while (waiting.length > 0) {
     const group = [waiting.shift()!]
-    for (let i = 0; i < group.length; i += 1) {
-      for (let j = 0; j < waiting.length;) {
-        if (isTied(group[i]!, waiting[j]!, spread)) group.push(...waiting.splice(j, 1))
-        else j += 1
-      }
-    }
+    for (let i = 0; i < group.length; i += 1) group.push(...takeTied(waiting, group[i]!, spread))
     groups.push(group.sort((a, b) => a.x - b.x || a.y - b.y || (a.id < b.id ? -1 : 1)))
   }
   return groups

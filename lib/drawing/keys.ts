@@ -40,7 +40,7 @@ function stripSpots(x: number, layout: Layout, px: (pixels: number) => number): 
 function elevationSpot({ crown }: Grown, layout: Layout, labeler: Labeler, strip: boolean): KeySpot {
   const foot = crown.z0 + crown.clearStem
   const top = crown.z0 + crown.height
-  const at = { x: crown.x, y: layout.elevationY(foot + (top - foot) * 0.55) }
+  const at = { x: crown.x, y: layout.elevationY(foot + (top - foot) * (strip ? 0.35 : 0.55)) }
   const small = Math.min(top - foot, crown.spread) * layout.pxPerInch < KEY_PX * 4.4
   if (strip) return { ...at, prefer: stripSpots(crown.x, layout, labeler.px) }
   return { ...at, prefer: small ? [{ x: crown.x, y: layout.elevationY(top) - labeler.px(KEY_PX + 5) }] : [] }

@@ -1,6 +1,6 @@
 /** The limits drawn on top: each with its own ink, its own dash and its length. */
 import { formatLength } from '../measure'
-import { wallY } from '../spacing'
+import { gradeAt, wallY } from '../spacing'
 import type { Labeler, Spot, Words } from './labels'
 import type { Layout } from './layout'
 import type { Ink } from './palette'
@@ -26,7 +26,7 @@ const TEXT_PX = 12
 const wordsIn = (ink: Ink, text: string): Words => ({ text, ink, sizePx: TEXT_PX, font: 'mono' })
 
 /** Places above and below a level line, from its left end to its right. */
-function alongLine(x1: number, x2: number, y: number, { px }: Labeler, belowFirst = false): Spot[] {
+function alongLine([x1, x2]: [number, number], y: number, { px }: Labeler, belowFirst = false): Spot[] {
   const above = y - px(4)
   const below = y + px(TEXT_PX + (belowFirst ? 6 : 2))
   const middle = (x1 + x2) / 2
@@ -45,11 +45,13 @@ function sillLines(sheet: Measured, layout: Layout, margins: Margins, labeler: L
     const limit = sill - margins.sill
     const y = layout.elevationY(limit)
     const over = labeler.px(8)
+    // Below the sill where the wall is tall enough there, else on the glass.
+    const room = (limit - gradeAt(sheet.facade, x + width / 2)) * layout.pxPerInch
     lines.push(path(segment(x - over, y, x + width + over, y), { stroke: 'sill-line', strokePx: 1.4, dashPx: [...DASH.sill] }))
     const long = `${name} sill ${formatLength(limit)}`
     const short = `sill ${formatLength(limit)}`
     const fits = long.length * TEXT_PX * 0.61 < (width + 24) * layout.pxPerInch
-    const text = labeler.setWords(wordsIn('sill-line', fits ? long : short), alongLine(x, x + width, y, labeler, true))
+    const text = labeler.setWords(wordsIn('sill-line', fits ? long : short), alongLine([x, x + width], y, labeler, room > 60))
     if (text) words.push(text)
   }
   return { lines, words }
@@ -61,7 +63,7 @@ function gutterLine(sheet: Measured, layout: Layout, margins: Margins, labeler: 
   const y = layout.elevationY(limit)
   const [l, r] = [layout.left - overhang, layout.right + overhang]
   const label = `${margins.gutter > 0 ? 'below gutter' : 'gutter'} ${formatLength(limit)}`
-  const text = labeler.setWords(wordsIn('gutter-line', label), alongLine(layout.left + labeler.px(4), layout.right - labeler.px(4), y, labeler))
+  const text = labeler.setWords(wordsIn('gutter-line', label), alongLine([layout.left + labeler.px(4), layout.right - labeler.px(4)], margins.gutter > 0 ? y : layout.elevationY(layout.eaves), labeler))
   return {
     lines: [path(segment(l, y, r, y), { stroke: 'gutter-line', strokePx: 1.3, dashPx: [...DASH.gutter] })],
     words: text ? [text] : [],
@@ -85,7 +87,7 @@ function walkEdges(sheet: Measured, layout: Layout, margins: Margins, labeler: L
     const box = boxAround(ring)
     const label = `${name} edge${margins.walk > 0 ? ` + ${formatLength(margins.walk)}` : ''}, ${formatLength(Math.max(box.width < box.height ? box.width : box.height, 0))} wide`
     const short = margins.walk > 0 ? `edge + ${formatLength(margins.walk)}` : 'walk edge'
-    const spots = [...alongLine(box.x + labeler.px(4), box.x + box.width - labeler.px(4), box.y + box.height, labeler), ...alongLine(box.x, box.x + box.width, box.y, labeler)]
+    const spots = [...alongLine([box.x + labeler.px(4), box.x + box.width - labeler.px(4)], box.y + box.height, labeler), ...alongLine([box.x, box.x + box.width], box.y, labeler)]
     const fits = label.length * TEXT_PX * 0.61 < Math.max(box.width, 60) * layout.pxPerInch
     const text = labeler.setWords(wordsIn('walk-edge', fits ? label : short), spots)
     if (text) words.push(text)

@@ -12,7 +12,7 @@ interface Props {
 
 /** The client's page: each house front with its plants, through years and seasons. Nothing internal reaches it. */
 export default async function ClientViewPage({ searchParams }: Props) {
-  const context = await requireContext()
+  const context = await requireContext('client')
   const { studio, project, facades } = getClientView(context, {})
   const shown = readShown(await searchParams)
   return (
