@@ -288,6 +288,7 @@ CREATE TABLE `projects` (
 	`fire_zone` integer NOT NULL,
 	`brief` text NOT NULL,
 	`notes` text DEFAULT '' NOT NULL,
+	`version` integer DEFAULT 0 NOT NULL,
 	`created_at` integer NOT NULL,
 	`updated_at` integer NOT NULL,
 	FOREIGN KEY (`studio_id`) REFERENCES `studios`(`id`) ON UPDATE no action ON DELETE cascade,

@@ -29,7 +29,10 @@ export const projects = sqliteTable(
     brief: json<Aim[]>('brief'),
     /** Internal words: never shown to the client. */
     notes: text('notes').notNull().default(''),
+    /** Rises with every save of the form: two people saving at once are told. */
+    version: integer('version').notNull().default(0),
     createdAt: createdAt(),
+    /** The last change of the form or of any of its drawings. */
     updatedAt: integer('updated_at').notNull(),
   },
   (t) => [
