@@ -3,7 +3,7 @@
  * concave over its height, so the crown is convex: every curve whose points lie on or within it stays within it.
  */
 import { radiusAt, type Crown } from '../spacing'
-import { num, type Dot } from './path'
+import { xy, type Dot } from './path'
 import type { Random } from './random'
 
 const STEPS = 22
@@ -50,9 +50,10 @@ export function envelopeOf(crown: Crown): Envelope {
     sums.push(sums[i - 1]! + Math.hypot(points[i]!.x - points[i - 1]!.x, points[i]!.z - points[i - 1]!.z))
   }
   const length = sums.at(-1)!
+  const middle = sums.length >> 1
   const at = (share: number): Spot => {
     const goal = Math.min(Math.max(share, 0), 1) * length
-    let i = 1
+    let i = sums[middle]! < goal ? middle : 1
     while (i < sums.length - 1 && sums[i]! < goal) i += 1
     const [a, b] = [points[i - 1]!, points[i]!]
     const t = (goal - sums[i - 1]!) / (sums[i]! - sums[i - 1]! || 1)
@@ -123,7 +124,7 @@ export interface Drawn {
 export function drawSilhouette(envelope: Envelope, style: EdgeStyle, random: Random, place: Place): Drawn {
   const write = (spot: Spot) => {
     const dot = place(spot)
-    return `${num(dot.x)} ${num(dot.y)}`
+    return xy(dot.x, dot.y)
   }
   const mirror = (spot: Spot) => write({ x: -spot.x, z: spot.z })
   const right = edgeData(envelope, bumpsOf(envelope, style, random), style.edge, write)

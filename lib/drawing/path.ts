@@ -12,7 +12,23 @@ export function num(value: number): number {
   return Number.isFinite(rounded) ? rounded + 0 : 0
 }
 
-const pair = (point: Dot) => `${num(point.x)} ${num(point.y)}`
+/** `.01` to `.99` as they stand behind a whole number, without trailing zeros. */
+const HUNDREDTHS = Array.from({ length: 100 }, (_, i) => (i === 0 ? '' : `.${String(i).padStart(2, '0').replace(/0$/, '')}`))
+
+/** Two coordinates as path data writes them, to hundredths. Whole numbers print several times faster than fractions. */
+export function xy(x: number, y: number): string {
+  return `${short(x)} ${short(y)}`
+}
+
+function short(value: number): string {
+  const hundredths = Math.round(value * 100)
+  if (!(Math.abs(hundredths) < 2 ** 31)) return String(num(value))
+  const size = hundredths < 0 ? -hundredths : hundredths
+  const whole = (size / 100) | 0
+  return `${hundredths < 0 ? '-' : ''}${whole}${HUNDREDTHS[size - whole * 100]}`
+}
+
+const pair = (point: Dot) => xy(point.x, point.y)
 
 /** An open line through points; '' without points. */
 export function line(points: readonly Dot[]): PathData {

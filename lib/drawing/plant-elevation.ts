@@ -36,7 +36,7 @@ function styleOf({ plant, placement }: Subject, envelope: Envelope): EdgeStyle {
   const bump = BUMP_IN[plant.texture] * (edge === 'leafy' ? 1 : 0.75) * Math.max(1, Math.sqrt(reach / 90))
   return {
     edge,
-    bumps: Math.min(26, Math.max(4, Math.round(reach / bump))),
+    bumps: Math.min(22, Math.max(4, Math.round(reach / bump))),
     depth: Math.max(0.3, Math.min(envelope.widest, envelope.top - envelope.bottom) * DEPTH_SHARE[plant.texture] * (edge === 'bladed' ? 3 : plant.leaf === 'herbaceous' ? 1.9 : 1)),
   }
 }

@@ -1,7 +1,7 @@
 /** One plant from above: full-grown outline, the largest on record dashed, today's size inside, a cross at the axis. */
-import { reach, type Crown } from '../spacing'
+import { reach, type Crown, type Placement } from '../spacing'
 import { lookOf, type Dress } from './foliage'
-import { boxOfCircle, circle, line, num, path } from './path'
+import { boxOfCircle, circle, line, path, xy } from './path'
 import type { Subject } from './plant-elevation'
 import { randomFrom, type Random } from './random'
 import type { PathShape, PlantDrawing, Shape } from './types'
@@ -14,25 +14,46 @@ export interface PlanSubject extends Subject {
 
 const radiusOf = (crown: Crown) => Math.max(0, reach(crown, crown.z0, crown.z0 + crown.height))
 
-/** A leafy ring within a circle: every bump touches it, every notch lies inside. */
-function leafyRing(cx: number, cy: number, radius: number, random: Random): string {
-  const bumps = Math.min(30, Math.max(8, Math.round(radius * 0.6)))
+/** A leafy ring in a unit circle, x and y by turns: every bump reaches the circle, every notch lies inside. */
+function unitRing(bumps: number, random: Random): number[] {
   const turn = random() * 2 * Math.PI
-  const at = (share: number, r: number) => {
+  const points: number[] = []
+  const put = (share: number, radius: number) => {
     const angle = turn + (share / bumps) * 2 * Math.PI
-    return `${num(cx + Math.cos(angle) * r)} ${num(cy + Math.sin(angle) * r)}`
+    points.push(Math.cos(angle) * radius, Math.sin(angle) * radius)
   }
-  const inner = () => radius * (0.925 + random() * 0.05)
-  const start = at(0, inner())
+  put(0, 0.95)
   let from = 0
-  const parts = Array.from({ length: bumps }, (_, i) => {
-    const to = i === bumps - 1 ? bumps : i + 1 + (random() - 0.5) * 0.55
+  for (let i = 0; i < bumps; i += 1) {
+    const last = i === bumps - 1
+    const to = last ? bumps : i + 1 + (random() - 0.5) * 0.55
     const step = to - from
-    const bump = `Q${at(from + step * 0.2, radius * 0.995)} ${at(from + step * 0.5, radius * 0.998)}Q${at(from + step * 0.8, radius * 0.995)} ${i === bumps - 1 ? start : at(to, inner())}`
+    put(from + step * 0.2, 0.995)
+    put(from + step * 0.5, 0.998)
+    put(from + step * 0.8, 0.995)
+    put(to, last ? 0.95 : 0.925 + random() * 0.05)
     from = to
-    return bump
-  })
-  return `M${start}${parts.join('')}Z`
+  }
+  return points
+}
+
+/** Rings are thrown once for each placement and size of growth; every year only scales them. */
+const rings = new WeakMap<Placement, { bumps: number; points: number[] }>()
+
+function ringOf(placement: Placement, full: number): number[] {
+  const bumps = Math.min(30, Math.max(8, Math.round(full * 0.6)))
+  const known = rings.get(placement)
+  if (known?.bumps === bumps) return known.points
+  const points = unitRing(bumps, randomFrom(`${placement.id} plan`))
+  rings.set(placement, { bumps, points })
+  return points
+}
+
+function scaledRing(points: readonly number[], { x, y }: { x: number; y: number }, radius: number): string {
+  const at = (i: number) => xy(x + points[2 * i]! * radius, y + points[2 * i + 1]! * radius)
+  const parts = [`M${at(0)}`]
+  for (let i = 1; i + 3 < points.length / 2; i += 4) parts.push(`Q${at(i)} ${at(i + 1)}Q${at(i + 2)} ${at(i + 3)}`)
+  return `${parts.join('')}Z`
 }
 
 function spokes(cx: number, cy: number, radius: number, random: Random): string {
@@ -53,10 +74,11 @@ function growing(subject: PlanSubject, cx: number, cy: number): Shape[] {
   const [full, most, today] = [radiusOf(subject.expected), radiusOf(subject.high), radiusOf(subject.crown)]
   const stays = placement.status === 'stays'
   const ink = stays ? 'ink-soft' : 'ink'
-  const ring = leafyRing(cx, cy, full, randomFrom(`${placement.id} plan`))
+  const points = ringOf(placement, full)
+  const ring = scaledRing(points, { x: cx, y: cy }, full)
   const shapes: Shape[] = [
     path(ring, { fill: look.fill, opacity: FULL[look.dress] }),
-    path(leafyRing(cx, cy, Math.max(today, 0.5), randomFrom(`${placement.id} today`)), { fill: look.fill, stroke: 'foliage-shade', strokePx: 0.6, opacity: TODAY[look.dress] }),
+    path(scaledRing(points, { x: cx, y: cy }, Math.max(today, 0.5)), { fill: look.fill, stroke: 'foliage-shade', strokePx: 0.6, opacity: TODAY[look.dress] }),
   ]
   if (look.dress === 'bare' || plant.category === 'grass') {
     shapes.push(path(spokes(cx, cy, full, randomFrom(`${placement.id} spokes`)), { stroke: 'bark', strokePx: 0.6, opacity: 0.8 }))

@@ -102,7 +102,7 @@ function addLimits(scene: Scene, { options: { sheet }, show, layout, labelers }:
 }
 
 /**
- * Both views of a sheet at a year, a bound and a month. 200 plants take less than 30 ms; what is unchanged is not
+ * Both views of a sheet at a year, a bound and a month. A plant drawn anew takes about 0.2 ms; what is unchanged is not
  * drawn anew. Placements whose plant is not on the sheet are left out.
  */
 export function buildScene(options: SceneOptions): Scene {

@@ -1,7 +1,7 @@
 /** The marks inside a crown: foliage texture, flowers, stems, bare branches, blades. All thrown from one seed. */
 import type { Texture } from '../plants'
 import type { Envelope, Place, Spot } from './envelope'
-import { num } from './path'
+import { num, xy } from './path'
 import type { Random } from './random'
 
 interface Grain {
@@ -12,8 +12,8 @@ interface Grain {
 }
 
 const GRAINS: Record<Texture, Grain> = {
-  fine: { area: 26, most: 90, size: 2.2 },
-  medium: { area: 44, most: 60, size: 3.2 },
+  fine: { area: 30, most: 48, size: 2.2 },
+  medium: { area: 46, most: 42, size: 3.2 },
   coarse: { area: 80, most: 40, size: 5 },
 }
 
@@ -23,7 +23,7 @@ export type Pen = (spot: Spot) => string
 export function penFor(place: Place): Pen {
   return (spot) => {
     const dot = place(spot)
-    return `${num(dot.x)} ${num(dot.y)}`
+    return xy(dot.x, dot.y)
   }
 }
 
@@ -58,8 +58,8 @@ export function textureStrokes(envelope: Envelope, texture: Texture, random: Ran
   const parts: string[] = []
   for (let i = 0; i < count; i += 1) {
     const spot = throwSpot(envelope, random, 0.14)
-    const marks = stroke(texture, spot, size * (0.7 + random() * 0.5), random).map((at) => keepIn(envelope, at))
     if (spot.x < 0 && random() < 0.45) continue
+    const marks = stroke(texture, spot, size * (0.7 + random() * 0.5), random).map((at) => keepIn(envelope, at))
     parts.push(marks.length === 2 ? `M${pen(marks[0]!)}L${pen(marks[1]!)}` : `M${pen(marks[0]!)}Q${pen(marks[1]!)} ${pen(marks[2]!)}`)
   }
   return parts.join('')
