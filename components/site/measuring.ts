@@ -85,6 +85,11 @@ export function problemsWith(sheet: Sheet, thing: Thing): Problem[] {
 
 const isKept = (sheet: Sheet, thing: Thing) => isSameThing(thingOn(sheet, targetOf(editOf(thing, ''))), thing.value)
 
+/** What is measured on a sheet; in which order its things stand does not count. */
+function measuresOf({ facade, site: { light, facing }, ...lists }: Sheet) {
+  return { facade, light, facing, things: Object.values(LIST_NAMES).map((name) => [...lists[name]].sort((a, b) => (a.id < b.id ? -1 : 1))) }
+}
+
 /** Edits with the things they touch as they stood before each: what the save queue takes. */
 function withBefore(sheet: Sheet, edits: readonly Edit[]): WaitingEdit[] {
   let now = sheet
@@ -212,7 +217,7 @@ export class Measuring {
       return !isSameThing(thingOn(before, target), thingOn(sheet, target))
     }
     const drafts = new Map([...this.state.drafts].filter(([, draft]) => !isChanged(draft)))
-    const steps = isSameThing(before, sheet) ? {} : { past: [], future: [] }
+    const steps = isSameThing(measuresOf(before), measuresOf(sheet)) ? {} : { past: [], future: [] }
     this.set({ sheet, drafts, ...steps, said: said ?? this.state.said })
   }
 

@@ -4,12 +4,12 @@ import { useEffect, useState } from 'react'
 import { v7 as newId } from 'uuid'
 import { applyEdits } from '@/lib/sheet'
 import type { Sheet } from '@/lib/spacing'
+import { saveCalls } from '../drawing-table/calls'
 import { MemoryQueueStore, type WaitingEdit } from '../drawing-table/editor/queue-store'
 import type { Clock } from '../drawing-table/editor/save-calls'
 import { SaveQueue } from '../drawing-table/editor/save-queue'
 import { IdbQueueStore, lockWatch } from '../drawing-table/editor/save-queue-idb'
 import { Measuring } from './measuring'
-import { sheetCalls } from './sheet-calls'
 
 export interface Opened {
   facade: { id: string; name: string }
@@ -28,24 +28,36 @@ const clock: Clock = {
 
 const over = (sheet: Sheet, waiting: readonly WaitingEdit[]) => applyEdits(sheet, waiting.map(({ edit }) => edit))
 
+/** Joins the two. Nothing is sent or stored before the first edit. */
 function openSheet({ facade, sheet, seq }: Opened) {
   const editor = newId()
   const watch = lockWatch()
   const hasStore = typeof indexedDB !== 'undefined'
-  const measuring = new Measuring(sheet, { send: (edits) => queue.push(edits), newId })
-  const queue = new SaveQueue({
+  let latest = seq
+  const calls = saveCalls(facade.id)
+  const measuring: Measuring = new Measuring(sheet, { send: (edits) => queue.push(edits), newId })
+  const queue: SaveQueue = new SaveQueue({
     facade: facade.id,
     editor,
     base: seq,
     store: hasStore ? new IdbQueueStore(watch, clock.now) : new MemoryQueueStore(),
-    calls: sheetCalls(facade.id),
+    calls,
     clock,
     events: {
-      saved: () => {},
+      saved: (_edits, answer, isLatest) => void (isLatest && refresh(answer.seq)),
       refused: (edit, message) => measuring.withdraw(edit, message),
       served: (served, rest, dropped) => measuring.adopt(over(served.sheet, rest), dropped.length > 0 ? 'Theirs taken' : null),
     },
   })
+
+  /** Others may have changed things this page has not seen: their sheet is shown, if nothing newer waits. */
+  async function refresh(since: number) {
+    latest = since
+    const answer = await calls.readSheet()
+    // An answer asked for before a later save must not bring the older sheet back.
+    if (answer.ok && latest === since && queue.unsaved.length === 0) queue.adopt(answer.value)
+  }
+
   return { measuring, queue, editor, watch }
 }
 

@@ -149,6 +149,15 @@ describe('a sheet from the server', () => {
     expect(measuring.getState().past).toHaveLength(1)
   })
 
+  test('with the same measures in another order leaves the steps as they are', () => {
+    measuring.remove(kitchen({}))
+    measuring.undo()
+    const { past, sheet } = measuring.getState()
+    measuring.adopt({ ...sheet, openings: sheet.openings.toReversed() }, null)
+    expect(measuring.getState().past).toBe(past)
+    expect(measuring.getState().future).toHaveLength(1)
+  })
+
   test('leaves what is typed into things the others did not touch', () => {
     measuring.type(front({ gutter: -50 }))
     measuring.type(kitchen({ sill: 95 }))
