@@ -34,6 +34,7 @@ function openSheet({ facade, sheet, seq }: Opened) {
   const watch = lockWatch()
   const hasStore = typeof indexedDB !== 'undefined'
   let latest = seq
+  let areOthersHere = false
   const calls = saveCalls(facade.id)
   const measuring: Measuring = new Measuring(sheet, { send: (edits) => queue.push(edits), newId })
   const queue: SaveQueue = new SaveQueue({
@@ -44,18 +45,26 @@ function openSheet({ facade, sheet, seq }: Opened) {
     calls,
     clock,
     events: {
-      saved: (_edits, answer, isLatest) => void (isLatest && refresh(answer.seq)),
+      saved: (_edits, answer, isLatest) => {
+        // Every saved batch raises the seq by one: a wider step is somebody else's.
+        areOthersHere ||= answer.seq > latest + 1
+        latest = Math.max(latest, answer.seq)
+        if (isLatest && areOthersHere) void refresh()
+      },
       refused: (edit, message) => measuring.withdraw(edit, message),
-      served: (served, rest, dropped) => measuring.adopt(over(served.sheet, rest), dropped.length > 0 ? 'Theirs taken' : null),
+      served: (served, rest, dropped) => {
+        latest = served.seq
+        areOthersHere = false
+        measuring.adopt(over(served.sheet, rest), dropped.length > 0 ? 'Theirs taken' : null)
+      },
     },
   })
 
   /** Others may have changed things this page has not seen: their sheet is shown, if nothing newer waits. */
-  async function refresh(since: number) {
-    latest = since
+  async function refresh() {
     const answer = await calls.readSheet()
     // An answer asked for before a later save must not bring the older sheet back.
-    if (answer.ok && latest === since && queue.unsaved.length === 0) queue.adopt(answer.value)
+    if (answer.ok && answer.value.seq >= latest && queue.unsaved.length === 0) queue.adopt(answer.value)
   }
 
   return { measuring, queue, editor, watch }
