@@ -13,7 +13,8 @@ interface Props {
 /** The client's page: each house front with its plants, through years and seasons. Nothing internal reaches it. */
 export default async function ClientViewPage({ searchParams }: Props) {
   const context = await requireContext('client')
-  const { studio, project, facades } = getClientView(context, {})
+  const { studio, project, facades } = getClientView(context)
+  const fronts = facades.map(({ id, name, sheet }) => ({ id, name, sheet: { ...sheet, placements: sheet.placements.filter(({ status }) => status !== 'goes') } }))
   const shown = readShown(await searchParams)
   return (
     <main className="mx-auto min-h-dvh max-w-5xl bg-paper text-ink">
@@ -22,7 +23,7 @@ export default async function ClientViewPage({ searchParams }: Props) {
         <h1 className="mt-1 font-heading text-3xl leading-tight break-words">{project.name}</h1>
         <p className="mt-2">Your house front with its new plants, from planting day to twenty years on. Sizes are what we expect; each garden grows a little differently.</p>
       </header>
-      {facades.length === 0 ? <NothingYet studio={studio.name} /> : <ClientGarden facades={facades} shown={shown} />}
+      {fronts.length === 0 ? <NothingYet studio={studio.name} /> : <ClientGarden facades={fronts} shown={shown} />}
     </main>
   )
 }
