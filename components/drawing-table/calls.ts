@@ -4,6 +4,9 @@ import type { Answer, SaveCalls } from './editor'
 
 const OFFLINE = 'The server cannot be reached.'
 
+/** A page ahead of the server (its data were put back) must not take its edits for bad ones. */
+const isAboutBase = ({ problems = [] }: ErrorBody['error']) => problems.some(({ path }) => path[0] === 'base')
+
 /** Which edit of the batch a refusal is about: problems are named by paths such as ["edits", 3, "value", "x"]. */
 function placeOf({ problems = [] }: ErrorBody['error']): number | undefined {
   const at = problems.map(({ path }) => (path[0] === 'edits' ? path[1] : undefined)).find((step) => typeof step === 'number')
@@ -18,7 +21,8 @@ async function ask<T>(address: string, init?: RequestInit): Promise<Answer<T>> {
     const { error } = body
     const at = error && placeOf(error)
     const message = error?.problems?.[0]?.message ?? error?.message ?? `The server answered ${response.status}.`
-    return { ok: false, status: response.status, message, ...(at !== undefined && { at }) }
+    const status = error && isAboutBase(error) ? 400 : response.status
+    return { ok: false, status, message, ...(at !== undefined && { at }) }
   } catch {
     return { ok: false, status: 0, message: OFFLINE }
   }

@@ -1,7 +1,7 @@
 /** The editor and its line to the server, joined: what is made here is sent, what is answered is shown. */
-import { SaveQueue } from './save-queue'
-import type { QueueStore, WaitingEdit } from './queue-store'
-import type { Clock, SaveCalls, Saved, SheetReport } from './save-calls'
+import { SaveQueue, type SaveEvents } from './save-queue'
+import type { QueueStore } from './queue-store'
+import type { Clock, SaveCalls, SheetReport } from './save-calls'
 import { Editor } from './store'
 import { Viewport } from './view'
 import type { Sheet } from '@/lib/spacing'
@@ -24,23 +24,24 @@ interface Options {
   clock: Clock
 }
 
-const factsOf = ({ findings }: SheetReport): string => findings.map(({ key, kind }) => `${key} ${kind}`).join('\n')
-
 /** Makes a desk. Call `openDesk` once it is in use. */
 export function createDesk(options: Options): Desk {
   const { facade, sheet, seq, report, canEdit, newId, store, calls, clock } = options
   const editor: Editor = new Editor({ sheet, report, canEdit, newId, send: (edits) => queue.push(edits) })
 
+  let isBehind = false
   /** Others have changed things this page has not seen: their sheet is fetched and shown, if nothing newer waits. */
   const refresh = async () => {
     const answer = await calls.readSheet()
     if (answer.ok && queue.unsaved.length === 0) queue.adopt(answer.value)
   }
 
-  const saved = (edits: readonly WaitingEdit[], answer: Saved, isLatest: boolean) => {
-    const ours = factsOf(editor.getSnapshot().report)
+  const saved: SaveEvents['saved'] = (edits, answer, isLatest, othersSaved) => {
     editor.saved(edits, answer.report, isLatest)
-    if (isLatest && factsOf(answer.report) !== ours) void refresh()
+    isBehind ||= othersSaved
+    if (!isLatest || !isBehind) return
+    isBehind = false
+    void refresh()
   }
 
   const queue: SaveQueue = new SaveQueue({

@@ -1,7 +1,7 @@
 /** New placements and the order people walk them in. */
 import type { Plant } from '@/lib/plants'
 import { roundLength } from '@/lib/measure'
-import { sizeRange, type Placement, type Sheet, type Size } from '@/lib/spacing'
+import { sizeRange, wallDistance, wallY, type Facade, type Inches, type Placement, type Sheet, type Size } from '@/lib/spacing'
 
 /** Container stock as it usually comes: a third of the expected size, between a small pot and what two people can plant. */
 const PLANTED_SHARE = 1 / 3
@@ -32,4 +32,24 @@ export function neighbourOf(sheet: Pick<Sheet, 'placements'>, id: string | null,
   const at = order.findIndex((placement) => placement.id === id)
   if (at < 0) return (by > 0 ? order[0] : order.at(-1))?.id ?? null
   return order[at + by]?.id ?? null
+}
+
+const HALVINGS = 40
+
+/**
+ * The y at which a point of this x stands `distance` from the wall, returns of jogs counted, to the 1/64 in.
+ * Behind the wall the distance is negative.
+ */
+export function outFromWall(facade: Facade, x: Inches, distance: Inches): Inches {
+  let near = wallY(facade, x) + distance
+  if (distance <= 0) return roundLength(near)
+  // Straight out from the foremost wall nothing is nearer than the distance.
+  let far = facade.wall.reduce((most, { y }) => Math.max(most, y), -Infinity) + distance
+  if (wallDistance(facade, x, near) >= distance) return roundLength(near)
+  for (let i = 0; i < HALVINGS; i += 1) {
+    const middle = (near + far) / 2
+    if (wallDistance(facade, x, middle) >= distance) far = middle
+    else near = middle
+  }
+  return roundLength(far)
 }

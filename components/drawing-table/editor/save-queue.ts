@@ -35,8 +35,8 @@ export interface SaveState {
 
 /** What the queue tells the editor. */
 export interface SaveEvents {
-  /** The server has these; `isLatest` when nothing newer waits. */
-  saved: (edits: readonly WaitingEdit[], answer: Saved, isLatest: boolean) => void
+  /** The server has these; `isLatest` when nothing newer waits. `othersSaved`: it holds more than this page knows. */
+  saved: (edits: readonly WaitingEdit[], answer: Saved, isLatest: boolean, othersSaved: boolean) => void
   /** This one was refused and taken out; `rest` still waits. */
   refused: (edit: WaitingEdit, message: string, rest: readonly WaitingEdit[]) => void
   /** The server's sheet stands, with `rest` still to go on top; `dropped` were given up for theirs. */
@@ -202,10 +202,12 @@ export class SaveQueue extends Observable<SaveState> {
     this.failures = 0
     this.rebases = 0
     this.savedAt = this.options.clock.now()
+    // A batch of ours raises the seq by one.
+    const othersSaved = answer.value.seq > this.base + 1
     this.base = answer.value.seq
     this.edits = this.edits.filter((waiting) => !batch.includes(waiting))
     this.keep()
-    this.options.events.saved(batch, answer.value, this.edits.length === 0)
+    this.options.events.saved(batch, answer.value, this.edits.length === 0, othersSaved)
     return true
   }
 

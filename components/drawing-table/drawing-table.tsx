@@ -1,0 +1,100 @@
+'use client'
+/** The drawing table of one facade: the drawing in the middle, tools at the left, words and numbers at the right, time below. */
+import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
+import { useEffect, useMemo, useState } from 'react'
+import { v7 as newId } from 'uuid'
+import type { Sheet } from '@/lib/spacing'
+import { Announcements } from './announcements'
+import { saveCalls } from './calls'
+import { DeskProvider, useDesk, useEditorState } from './desk-context'
+import { DrawingFrame } from './drawing-frame'
+import { createDesk, MemoryQueueStore, openDesk, type Desk, type SheetReport } from './editor'
+import { IdbQueueStore, lockWatch } from './editor/save-queue-idb'
+import { HelpDialog } from './help-dialog'
+import { PlantPicker } from './plant-picker'
+import { SaveNotices } from './save-notices'
+import { SidePanel, type TabName } from './side-panel'
+import { systemClock } from './system-clock'
+import { TimeBar } from './time-bar'
+import { ToolRail } from './tool-rail'
+import { TopBar } from './top-bar'
+import type { TableFacade } from './types'
+
+interface Props {
+  facade: TableFacade
+  sheet: Sheet
+  seq: number
+  report: SheetReport
+  /** Without it the table is for looking only. */
+  canEdit: boolean
+  canListPlants: boolean
+}
+
+function makeDesk({ facade, sheet, seq, report, canEdit }: Props): Desk {
+  const hasDatabase = typeof indexedDB !== 'undefined'
+  return createDesk({
+    facade: facade.id, sheet, seq, report, canEdit, newId, clock: systemClock, calls: saveCalls(facade.id),
+    store: hasDatabase ? new IdbQueueStore(lockWatch(), systemClock.now) : new MemoryQueueStore(),
+  })
+}
+
+/** Desks already open: an effect may run twice, edits may not be claimed twice. */
+const opened = new WeakSet<Desk>()
+
+function useOpenDesk(desk: Desk) {
+  useEffect(() => {
+    if (!opened.has(desk)) {
+      opened.add(desk)
+      void openDesk(desk)
+    }
+    const { queue } = desk
+    window.addEventListener('online', queue.wake)
+    window.addEventListener('focus', queue.wake)
+    return () => {
+      window.removeEventListener('online', queue.wake)
+      window.removeEventListener('focus', queue.wake)
+    }
+  }, [desk])
+}
+
+export function DrawingTable(props: Props) {
+  const [desk] = useState(() => makeDesk(props))
+  const [queries] = useState(() => new QueryClient())
+  const [tab, setTab] = useState<TabName>('findings')
+  const [isHelpOpen, setHelpOpen] = useState(false)
+  useOpenDesk(desk)
+  const page = useMemo(() => ({
+    openHelp: () => setHelpOpen(true),
+    openPlants: () => desk.editor.setTool({ kind: 'plant', plant: null }),
+  }), [desk])
+  return (
+    <QueryClientProvider client={queries}>
+      <DeskProvider desk={desk} page={page}>
+        <div className="flex min-h-0 flex-1 flex-col">
+          <TopBar facade={props.facade} canListPlants={props.canListPlants} />
+          <SaveNotices />
+          <div className="flex min-h-0 flex-1">
+            <ToolRail />
+            <DrawingFrame name={props.facade.name} />
+            <Beside tab={tab} onTab={setTab} />
+          </div>
+          <TimeBar />
+        </div>
+        <HelpDialog isOpen={isHelpOpen} onClose={() => setHelpOpen(false)} />
+        <Announcements />
+      </DeskProvider>
+    </QueryClientProvider>
+  )
+}
+
+/** The library while a plant is being chosen, else the words and numbers; the table needs more room than the sentences. */
+function Beside({ tab, onTab }: { tab: TabName; onTab: (tab: TabName) => void }) {
+  const { editor } = useDesk()
+  const { tool } = useEditorState()
+  const isPicking = tool.kind === 'plant'
+  return (
+    <aside aria-label="Beside the drawing" className={`flex min-h-0 shrink-0 flex-col border-l border-rule ${!isPicking && tab === 'plants' ? 'w-[36rem]' : 'w-80 xl:w-96'}`}>
+      {isPicking ? <PlantPicker onClose={() => editor.setTool({ kind: 'move' })} /> : <SidePanel tab={tab} onTab={onTab} />}
+    </aside>
+  )
+}

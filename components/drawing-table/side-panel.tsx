@@ -1,0 +1,32 @@
+'use client'
+/** What is said of the drawing, in words and numbers. */
+import { Tabs } from 'radix-ui'
+import { FindingList } from '@/components/findings/finding-list'
+import { useDesk, useEditorState } from './desk-context'
+import { PlantForm } from './plant-form'
+import { PlantsTable } from './plants-table'
+
+export const TABS = ['findings', 'plants', 'plant'] as const
+export type TabName = (typeof TABS)[number]
+
+const TAB = 'min-h-11 border-b-3 border-transparent px-3 focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-leaf data-[state=active]:border-leaf data-[state=active]:font-bold data-[state=inactive]:text-ink-soft'
+const PAGE = 'min-h-0 flex-1 overflow-y-auto focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-leaf'
+
+export function SidePanel({ tab, onTab }: { tab: TabName; onTab: (tab: TabName) => void }) {
+  const { editor } = useDesk()
+  const { sheet, report, finding } = useEditorState()
+  return (
+    <Tabs.Root value={tab} onValueChange={(value) => onTab(TABS.find((one) => one === value) ?? 'findings')} className="flex min-h-0 flex-1 flex-col">
+      <Tabs.List aria-label="Beside the drawing" className="flex border-b border-rule px-2 pt-2">
+        <Tabs.Trigger value="findings" className={TAB}>Findings {report.findings.length}</Tabs.Trigger>
+        <Tabs.Trigger value="plants" className={TAB}>Plants {sheet.placements.length}</Tabs.Trigger>
+        <Tabs.Trigger value="plant" className={TAB}>This plant</Tabs.Trigger>
+      </Tabs.List>
+      <Tabs.Content value="findings" className={PAGE}>
+        <FindingList findings={report.findings} sheet={sheet} chosen={finding} onChoose={editor.selectFinding} />
+      </Tabs.Content>
+      <Tabs.Content value="plants" className={PAGE}><PlantsTable /></Tabs.Content>
+      <Tabs.Content value="plant" className={PAGE}><PlantForm /></Tabs.Content>
+    </Tabs.Root>
+  )
+}
