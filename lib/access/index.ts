@@ -34,3 +34,5 @@ export const PERMISSIONS = Object.keys(TABLE) as Permission[]
 export function can(role: Role, permission: Permission): boolean {
   return (TABLE[permission] as readonly Role[]).includes(role)
 }
+
+export { MAX_PASSWORD, MIN_PASSWORD, passwordProblem } from './password-problem'

@@ -12,3 +12,5 @@ export const STAGE_WORDS: Record<Stage, string> = {
   accepted: 'Accepted',
   planted: 'Planted',
 }
+
+export * from './schema'

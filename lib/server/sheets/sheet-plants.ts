@@ -1,0 +1,24 @@
+import { and, eq, inArray, isNull, or } from 'drizzle-orm'
+import type { Db } from '@/db/open'
+import { plants } from '@/db/schema'
+import type { Plant } from '@/lib/plants'
+
+/** The columns that stand in a sheet: a plant's facts without whose it is or where they were read. */
+const SHEET_COLUMNS = {
+  id: plants.id, botanical: plants.botanical, common: plants.common, category: plants.category, leaf: plants.leaf,
+  heightMin: plants.heightMin, heightMax: plants.heightMax, spreadMin: plants.spreadMin, spreadMax: plants.spreadMax,
+  habit: plants.habit, growth: plants.growth, zoneMin: plants.zoneMin, zoneMax: plants.zoneMax, light: plants.light,
+  water: plants.water, foliageColor: plants.foliageColor, texture: plants.texture, bloomMonths: plants.bloomMonths,
+  bloomColor: plants.bloomColor, deer: plants.deer, toxicity: plants.toxicity, juglone: plants.juglone,
+  thorns: plants.thorns, invasive: plants.invasive, native: plants.native, prune: plants.prune,
+}
+
+/** Plants by id that the studio may use (shared ones and its own), in the order asked for; unknown ids are left out. */
+export function sheetPlants(db: Db, studioId: string, ids: Iterable<string>): Plant[] {
+  const wanted = [...new Set(ids)]
+  if (wanted.length === 0) return []
+  const isVisible = or(isNull(plants.studioId), eq(plants.studioId, studioId))
+  const rows = db.select(SHEET_COLUMNS).from(plants).where(and(inArray(plants.id, wanted), isVisible)).all()
+  const byId = new Map<string, Plant>(rows.map((row) => [row.id, row]))
+  return wanted.flatMap((id) => byId.get(id) ?? [])
+}
