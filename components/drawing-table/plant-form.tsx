@@ -110,13 +110,15 @@ function withKept(placement: Placement, change: { height?: number | undefined; s
     ...(merged.height !== undefined && { height: merged.height }),
     ...(merged.spread !== undefined && { spread: merged.spread }),
   }
-  const { kept: _old, ...rest } = placement
-  return Object.keys(kept).length > 0 ? { ...rest, kept } : rest
+  const next: Placement = { ...placement, kept }
+  if (Object.keys(kept).length === 0) delete next.kept
+  return next
 }
 
 function withDrift(placement: Placement, drift: string): Placement {
-  const { drift: _old, ...rest } = placement
-  return drift === '' ? rest : { ...rest, drift }
+  const next: Placement = { ...placement, drift }
+  if (drift === '') delete next.drift
+  return next
 }
 
 function Head({ sheet, placement }: { sheet: Sheet; placement: Placement }) {

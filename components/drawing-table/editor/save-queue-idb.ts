@@ -50,15 +50,15 @@ export class IdbQueueStore implements QueueStore {
   async write(waiting: Waiting): Promise<void> {
     const database = await this.open()
     if (waiting.edits.length === 0) await database.delete('waiting', [waiting.facade, waiting.editor])
-    else await database.put('waiting', { ...waiting, at: this.now() }, undefined)
+    else await database.put('waiting', { ...waiting, at: this.now() })
   }
 
   async claim(facade: string): Promise<Waiting[]> {
     const database = await this.open()
     const all = await database.getAllFromIndex('waiting', 'facade', facade)
     const mine: Waiting[] = []
-    for (const { at: _at, ...waiting } of all.sort((a, b) => a.at - b.at)) {
-      if (await this.watch.take(waiting.editor)) mine.push(waiting)
+    for (const { editor, base, edits } of all.sort((a, b) => a.at - b.at)) {
+      if (await this.watch.take(editor)) mine.push({ facade, editor, base, edits })
     }
     return mine
   }
