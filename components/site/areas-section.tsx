@@ -5,7 +5,7 @@ import { outlineOf, rectangleOf, type Rectangle } from '@/lib/sheet'
 import type { Bed, Point, Walk } from '@/lib/spacing'
 import { LengthField } from './length-field'
 import { useFresh, useMeasure, useThing } from './measure-context'
-import { freeName, newBed, newWalk } from './new-things'
+import { nameOfCopy, newBed, newWalk } from './new-things'
 import { ActionButton, Choice, NotKept, EmptySection, FieldGrid, NameField, Row, Section } from './parts'
 import { PointRows } from './point-rows'
 
@@ -121,7 +121,7 @@ export function AreasSection({ kind }: { kind: 'walk' | 'bed' }) {
             <AreaRow
               kind={kind}
               id={id}
-              onCopy={(area) => put({ ...area, id: newId(), name: freeName(area.name.replace(/ \d+$/, ''), areas) }, `${area.name} copied`)}
+              onCopy={(area) => put({ ...area, id: newId(), name: nameOfCopy(area, areas) }, `${area.name} copied`)}
               onRemove={(value) => measuring.remove({ kind, value })}
             />
           </li>

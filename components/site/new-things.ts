@@ -21,11 +21,26 @@ function freeSpot({ facade, openings }: Sheet, width: number): number {
 }
 
 /** A number no other thing of that word bears: "Window 3". */
-export function freeName(word: string, things: readonly { name: string }[]): string {
+export function freeName(word: string, things: readonly { name: string }[], first = 1): string {
   const taken = new Set(things.map(({ name }) => name.toLowerCase()))
-  let count = 1
+  let count = first
   while (taken.has(`${word} ${count}`.toLowerCase())) count += 1
   return `${word} ${count}`
+}
+
+/** A copy counts on from its model: Kitchen, Kitchen 2. */
+export const nameOfCopy = ({ name }: { name: string }, things: readonly { name: string }[]): string => freeName(name.replace(/ \d+$/, ''), things, 2)
+
+/** The soil line with one more point: at the right corner where it ends short of it, else amid its widest gap, on the line. */
+export function withSoilPoint({ wall, grade }: Facade): Facade['grade'] {
+  const last = grade.at(-1)!
+  const right = wall.at(-1)!.x
+  if (last.x < right) return [...grade, { x: right, z: last.z }]
+  const gaps = grade.slice(1).map(({ x }, i) => x - grade[i]!.x)
+  const widest = gaps.indexOf(Math.max(...gaps))
+  const [from, to] = [grade[widest], grade[widest + 1]]
+  if (!from || !to) return [...grade, { x: last.x + 48, z: last.z }]
+  return grade.toSpliced(widest + 1, 0, { x: roundLength((from.x + to.x) / 2), z: roundLength((from.z + to.z) / 2) })
 }
 
 /** Window 36 in wide, sill 36 and head 84 in above the soil there; door 36 in wide, sill 8 and head 88 in above it. */
@@ -78,5 +93,5 @@ export function newBed({ facade, beds }: Sheet, id: string): Bed {
 export function copyOfOpening({ facade, openings }: Sheet, opening: Opening, id: string): Opening {
   const x = opening.x + opening.width + 12
   const hasRoom = x + opening.width <= wallEnds(facade).right
-  return { ...opening, id, name: freeName(opening.name.replace(/ \d+$/, ''), openings), x: hasRoom ? x : opening.x }
+  return { ...opening, id, name: nameOfCopy(opening, openings), x: hasRoom ? x : opening.x }
 }

@@ -2,6 +2,7 @@
 import { parseLength } from '@/lib/measure'
 import { LengthField } from './length-field'
 import { useMeasure, useThing } from './measure-context'
+import { withSoilPoint } from './new-things'
 import { ActionButton, FieldGrid, RowTable, Section } from './parts'
 import { TypedField, type Read } from './typed-field'
 
@@ -20,10 +21,7 @@ export function SoilSection() {
   const { grade } = facade
   const moved = (i: number, change: Partial<(typeof grade)[number]>) => grade.map((point, at) => (at === i ? { ...point, ...change } : point))
   const addPoint = () => {
-    const last = grade.at(-1)!
-    const right = facade.wall.at(-1)!.x
-    const x = last.x < right ? right : last.x + 48
-    choose({ grade: [...grade, { x, z: last.z }] })
+    choose({ grade: withSoilPoint(facade) })
   }
   return (
     <Section id="soil" title="Soil" lead="Stretch a level line along the wall and measure down to the soil. Zero is the level you choose: the soil at the left corner is usual.">

@@ -1,7 +1,7 @@
 /** A new thing is sound beside whatever is there. */
 import { describe, expect, test } from 'vitest'
 import { problemsWith, type Thing } from '@/components/site/measuring'
-import { copyOfOpening, freeName, newBed, newFixture, newOpening, newWalk } from '@/components/site/new-things'
+import { copyOfOpening, freeName, newBed, newFixture, newOpening, newWalk, withSoilPoint } from '@/components/site/new-things'
 import { FIXTURE_KINDS, type Sheet } from '@/lib/spacing'
 import { sampleSheet } from '../../lib/sheet/sample'
 
@@ -34,7 +34,13 @@ test('names count on', () => expect(freeName('Bed', [{ name: 'Bed 1' }, { name: 
 
 test('a copy stands beside its model, or in its place where the wall ends', () => {
   const sheet = sampleSheet()
-  expect(copyOfOpening(sheet, sheet.openings[0]!, 'n')).toMatchObject({ id: 'n', name: 'Kitchen 1', x: 144, width: 72 })
+  expect(copyOfOpening(sheet, sheet.openings[0]!, 'n')).toMatchObject({ id: 'n', name: 'Kitchen 2', x: 144, width: 72 })
   const last = { ...sheet.openings[0]!, x: 440 }
   expect(copyOfOpening(sheet, last, 'n').x).toBe(440)
+})
+
+test('a new soil point completes the line to the corner, then halves its widest gap', () => {
+  const { facade } = sampleSheet()
+  expect(withSoilPoint({ ...facade, grade: [{ x: 0, z: 3 }] })).toEqual([{ x: 0, z: 3 }, { x: 528, z: 3 }])
+  expect(withSoilPoint({ ...facade, grade: [{ x: 0, z: 0 }, { x: 100, z: 0 }, { x: 528, z: -4 }] })[2]).toEqual({ x: 314, z: -2 })
 })
