@@ -32,6 +32,7 @@ export function lockWatch(): Watch {
 export class IdbQueueStore implements QueueStore {
   readonly isLasting = true
   private opened: Promise<IDBPDatabase<Schema>> | null = null
+  private readonly held = new Set<string>()
 
   constructor(
     private readonly watch: Watch,
@@ -47,7 +48,16 @@ export class IdbQueueStore implements QueueStore {
     return this.opened
   }
 
+  /** The name for this page, for good: no other open page may send what is written under it. */
+  private async hold(editor: string): Promise<boolean> {
+    if (this.held.has(editor)) return true
+    const isOurs = await this.watch.take(editor)
+    if (isOurs) this.held.add(editor)
+    return isOurs
+  }
+
   async write(waiting: Waiting): Promise<void> {
+    await this.hold(waiting.editor)
     const database = await this.open()
     if (waiting.edits.length === 0) await database.delete('waiting', [waiting.facade, waiting.editor])
     else await database.put('waiting', { ...waiting, at: this.now() })
@@ -58,7 +68,7 @@ export class IdbQueueStore implements QueueStore {
     const all = await database.getAllFromIndex('waiting', 'facade', facade)
     const mine: Waiting[] = []
     for (const { editor, base, edits } of all.sort((a, b) => a.at - b.at)) {
-      if (await this.watch.take(editor)) mine.push({ facade, editor, base, edits })
+      if (await this.hold(editor)) mine.push({ facade, editor, base, edits })
     }
     return mine
   }

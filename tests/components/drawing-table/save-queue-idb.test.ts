@@ -13,15 +13,20 @@ function stores() {
   const taken = new Set<string>()
   let time = 0
   const watch: Watch = { take: async (editor) => !taken.has(editor) && Boolean(taken.add(editor)) }
-  return { taken, store: () => new IdbQueueStore(watch, () => (time += 1)) }
+  return {
+    store: () => new IdbQueueStore(watch, () => (time += 1)),
+    /** All pages are closed: their names are free. */
+    closeAll: () => taken.clear(),
+  }
 }
 
 test('what waits is there for the next page, oldest first, and gone once nothing waits', async () => {
-  const { store } = stores()
+  const { store, closeAll } = stores()
   await store().write(waiting('late'))
   await store().write(waiting('early', 'other-side'))
   await store().write({ ...waiting('late'), base: 4 })
   await store().write(waiting('second', 'front', 2))
+  closeAll()
   const next = store()
   expect(await next.claim('front')).toEqual([{ ...waiting('late'), base: 4 }, waiting('second', 'front', 2)])
   await next.write(waiting('late', 'front', 0))
@@ -31,9 +36,9 @@ test('what waits is there for the next page, oldest first, and gone once nothing
 })
 
 test('what an open page looks after is left to it', async () => {
-  const { store, taken } = stores()
-  await store().write(waiting('open-elsewhere', 'back'))
+  const { store, closeAll } = stores()
   await store().write(waiting('left', 'back'))
-  taken.add('open-elsewhere')
+  closeAll()
+  await store().write(waiting('open-elsewhere', 'back'))
   expect((await store().claim('back')).map(({ editor }) => editor)).toEqual(['left'])
 })
