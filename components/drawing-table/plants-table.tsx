@@ -23,7 +23,7 @@ function PlacementRow({ sheet, placement, keyLetter, isSelected }: RowProps) {
   const cell = { readOnly: !editor.canEdit }
   const { planted } = placement
   return (
-    <tr data-placement={placement.id} aria-selected={isSelected} className="border-b border-rule align-top aria-selected:bg-sheet aria-selected:shadow-[inset_3px_0_0_var(--color-leaf)]">
+    <tr data-placement={placement.id} data-selected={isSelected || undefined} className="border-b border-rule align-top data-selected:bg-sheet data-selected:shadow-[inset_3px_0_0_var(--color-leaf)]">
       <th scope="row" className="min-w-40 text-left font-normal">
         <button type="button" aria-pressed={isSelected} onClick={() => editor.select(isSelected ? null : placement.id)} className={`${QUIET} w-full justify-start text-left no-underline`}>
           <span className="grid size-6 shrink-0 place-items-center rounded-full border border-ink text-sm font-bold">{keyLetter || '-'}</span>

@@ -14,7 +14,7 @@ const PAGE = 'min-h-0 flex-1 overflow-y-auto focus-visible:outline-2 focus-visib
 
 export function SidePanel({ tab, onTab }: { tab: TabName; onTab: (tab: TabName) => void }) {
   const { editor } = useDesk()
-  const { sheet, report, finding } = useEditorState()
+  const { sheet, report, finding, selected } = useEditorState()
   return (
     <Tabs.Root value={tab} onValueChange={(value) => onTab(TABS.find((one) => one === value) ?? 'findings')} className="flex min-h-0 flex-1 flex-col">
       <Tabs.List aria-label="Beside the drawing" className="flex border-b border-rule px-2 pt-2">
@@ -23,7 +23,7 @@ export function SidePanel({ tab, onTab }: { tab: TabName; onTab: (tab: TabName) 
         <Tabs.Trigger value="plant" className={TAB}>This plant</Tabs.Trigger>
       </Tabs.List>
       <Tabs.Content value="findings" className={PAGE}>
-        <FindingList findings={report.findings} sheet={sheet} chosen={finding} onChoose={editor.selectFinding} />
+        <FindingList findings={report.findings} sheet={sheet} chosen={finding} selected={selected} onChoose={editor.selectFinding} />
       </Tabs.Content>
       <Tabs.Content value="plants" className={PAGE}><PlantsTable /></Tabs.Content>
       <Tabs.Content value="plant" className={PAGE}><PlantForm /></Tabs.Content>

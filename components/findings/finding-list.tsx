@@ -9,6 +9,8 @@ interface Props {
   sheet: Sheet
   /** Key of the finding shown on the drawing. */
   chosen: string | null
+  /** Placement selected on the drawing: what is said of it stands out. */
+  selected: string | null
   onChoose: (key: string | null) => void
 }
 
@@ -56,7 +58,7 @@ function Facts({ finding }: { finding: Finding }) {
   )
 }
 
-function OneFinding({ finding, sheet, isChosen, onChoose }: { finding: Finding; sheet: Sheet; isChosen: boolean; onChoose: Props['onChoose'] }) {
+function OneFinding({ finding, sheet, isChosen, isConcerned, onChoose }: { finding: Finding; sheet: Sheet; isChosen: boolean; isConcerned: boolean; onChoose: Props['onChoose'] }) {
   const { title, sentence, wayOut } = describe(finding, sheet)
   return (
     <li className={`border-b border-rule ${isChosen ? 'bg-sheet' : ''}`}>
@@ -64,7 +66,7 @@ function OneFinding({ finding, sheet, isChosen, onChoose }: { finding: Finding; 
         type="button"
         aria-pressed={isChosen}
         onClick={() => onChoose(isChosen ? null : finding.key)}
-        className={`flex min-h-11 w-full gap-3 border-l-4 px-4 py-3 text-left focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-leaf ${isChosen ? 'border-leaf' : 'border-transparent'}`}
+        className={`flex min-h-11 w-full gap-3 border-l-4 px-4 py-3 text-left focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-leaf ${isChosen ? 'border-leaf' : isConcerned ? 'border-ink-soft' : 'border-transparent'}`}
       >
         <KindMark kind={finding.kind} />
         <span className="min-w-0">
@@ -79,14 +81,14 @@ function OneFinding({ finding, sheet, isChosen, onChoose }: { finding: Finding; 
 }
 
 /** See `Props`. Says so when there is nothing to say. */
-export function FindingList({ findings, sheet, chosen, onChoose }: Props) {
+export function FindingList({ findings, sheet, chosen, selected, onChoose }: Props) {
   if (findings.length === 0) {
     return <p className="p-4">{sheet.placements.length === 0 ? 'What will outgrow its place is told here once something is planted.' : 'Nothing here will outgrow its place.'}</p>
   }
   return (
     <ul>
       {findings.map((finding) => (
-        <OneFinding key={finding.key} finding={finding} sheet={sheet} isChosen={finding.key === chosen} onChoose={onChoose} />
+        <OneFinding key={finding.key} finding={finding} sheet={sheet} isChosen={finding.key === chosen} isConcerned={selected !== null && finding.placements.includes(selected)} onChoose={onChoose} />
       ))}
     </ul>
   )

@@ -107,6 +107,7 @@ export class Board {
   }
 
   private redrawAll(): void {
+    cancelAnimationFrame(this.frame)
     this.labelScale = this.desk.viewport.view.scale
     this.scene = this.build(this.labelScale)
     const { elevation, plan } = this.scene
