@@ -30,8 +30,6 @@ const over = (sheet: Sheet, waiting: readonly WaitingEdit[]) => applyEdits(sheet
 
 /** Joins the two. Nothing is sent or stored before the first edit. */
 function openSheet({ facade, sheet, seq }: Opened) {
-  const editor = newId()
-  const watch = lockWatch()
   const hasStore = typeof indexedDB !== 'undefined'
   let latest = seq
   let areOthersHere = false
@@ -39,9 +37,9 @@ function openSheet({ facade, sheet, seq }: Opened) {
   const measuring: Measuring = new Measuring(sheet, { send: (edits) => queue.push(edits), newId })
   const queue: SaveQueue = new SaveQueue({
     facade: facade.id,
-    editor,
+    editor: newId(),
     base: seq,
-    store: hasStore ? new IdbQueueStore(watch, clock.now) : new MemoryQueueStore(),
+    store: hasStore ? new IdbQueueStore(lockWatch(), clock.now) : new MemoryQueueStore(),
     calls,
     clock,
     events: {
@@ -67,21 +65,27 @@ function openSheet({ facade, sheet, seq }: Opened) {
     if (answer.ok && answer.value.seq >= latest && queue.unsaved.length === 0) queue.adopt(answer.value)
   }
 
-  return { measuring, queue, editor, watch }
+  let isRestored = false
+  /** What an earlier page of this browser left unsent goes on the sheet and to the server; once, however often called. */
+  async function restore() {
+    if (isRestored) return
+    isRestored = true
+    const left = await queue.restore()
+    if (left.length > 0) measuring.adopt(over(measuring.getState().sheet, left), 'Brought back what waited on this device')
+  }
+
+  return { measuring, queue, restore }
 }
 
 /** The store and the queue of a facade; in the browser also what an earlier page left unsent. */
 export function useSavedSheet(opened: Opened): { measuring: Measuring; queue: SaveQueue } {
-  const [{ measuring, queue, editor, watch }] = useState(() => openSheet(opened))
+  const [{ measuring, queue, restore }] = useState(() => openSheet(opened))
   const { readOnly } = opened
   useEffect(() => {
     if (readOnly) return
-    void watch.take(editor)
-    void queue.restore().then((left) => {
-      if (left.length > 0) measuring.adopt(over(measuring.getState().sheet, left), 'Brought back what waited on this device')
-    })
+    void restore()
     window.addEventListener('online', queue.wake)
     return () => window.removeEventListener('online', queue.wake)
-  }, [readOnly, queue, measuring, watch, editor])
+  }, [readOnly, queue, restore])
   return { measuring, queue }
 }
