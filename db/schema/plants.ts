@@ -35,7 +35,7 @@ export const plants = sqliteTable(
     fruitColor: text('fruit_color').notNull(),
     fruitMonths: json<number[]>('fruit_months'),
     deer: text('deer').$type<DeerClass>().notNull(),
-    birds: text('birds').$type<BirdValue>().notNull(),
+    birds: json<BirdValue[]>('birds'),
     native: json<NativeRegion[]>('native'),
     thorns: yesNo('thorns'),
     toxicity: text('toxicity').$type<Toxicity>().notNull(),

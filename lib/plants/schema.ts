@@ -1,5 +1,6 @@
 /** Plant facts, strict: the sheet's plants, the library's, and rows of an import are all judged by this. */
 import { z } from '../zod'
+import { FACTS } from './facts'
 import {
   BIRD_VALUES, BLOOM_COLORS, CATEGORIES, DEER_CLASSES, FALL_COLORS, FOLIAGE_COLORS, GROWTHS, HABITS, JUGLONES, LEAVES,
   LIGHTS, NATIVE_REGIONS, PRUNES, TEXTURES, TOXICITIES, WATERS,
@@ -71,6 +72,16 @@ function checkRanges(plant: Ranges, context: z.RefinementCtx) {
 /** A plant as it stands in a sheet. */
 export const plantSchema = plantShape.superRefine(checkRanges)
 
+/** A place where facts were read. Only web addresses: they are shown as links. */
+export const sourceSchema = z.strictObject({
+  title: z.string().trim().min(1, { error: 'Give the source a title.' }).max(240, { error: 'A title has at most 240 characters.' }),
+  url: z
+    .string()
+    .trim()
+    .max(600, { error: 'An address has at most 600 characters.' })
+    .refine((url) => url === '' || (/^https?:\/\//i.test(url) && URL.canParse(url)), { error: 'An address starts with https:// or http://, or is left empty.' }),
+})
+
 /** A plant as a studio enters it or imports it: the id is ours to give. */
 export const plantInputSchema = plantShape
   .omit({ id: true })
@@ -78,7 +89,11 @@ export const plantInputSchema = plantShape
     fallColor: z.enum(FALL_COLORS),
     fruitColor: z.string().trim().max(24),
     fruitMonths: monthsSchema,
-    birds: z.enum(BIRD_VALUES),
+    birds: z.array(z.enum(BIRD_VALUES)).max(BIRD_VALUES.length),
+    /** Where the facts were read. */
+    sources: z.array(sourceSchema).max(12, { error: 'At most twelve sources.' }),
+    /** Facts that are from memory; without any source, all of them are. */
+    memoryFacts: z.array(z.enum(FACTS)).max(FACTS.length),
   })
   .superRefine(checkRanges)
 

@@ -20,7 +20,7 @@ export const TEXTURES = ['fine', 'medium', 'coarse'] as const
 export const BLOOM_COLORS = ['white', 'pink', 'red', 'orange', 'yellow', 'green', 'blue', 'purple', 'multi', ''] as const
 export const FALL_COLORS = ['none', 'yellow', 'orange', 'red', 'purple', 'bronze', 'multi'] as const
 export const DEER_CLASSES = ['rarely', 'seldom', 'occasionally', 'frequently', 'unknown'] as const
-export const BIRD_VALUES = ['fruit', 'seed', 'nectar', 'shelter', ''] as const
+export const BIRD_VALUES = ['fruit', 'seed', 'nectar', 'shelter'] as const
 export const NATIVE_REGIONS = ['northeast', 'southeast', 'midwest', 'south-central', 'mountain', 'pacific'] as const
 export const TOXICITIES = ['unlisted', 'irritant', 'toxic'] as const
 export const JUGLONES = ['tolerant', 'sensitive', 'unknown'] as const
@@ -87,11 +87,15 @@ export interface LibraryPlant extends Plant {
   /** Fruit colour and months, as printed; '' = none of note. */
   fruitColor: string
   fruitMonths: number[]
-  birds: BirdValue
+  /** What birds have of it; [] = nothing of note. */
+  birds: BirdValue[]
   sources: PlantSource[]
 }
 
-/** Where facts of a plant were read. `facts` names the fields (database column style) this source carries. */
+/**
+ * Where facts of a plant were read. `facts` names them as the columns of an import do (see FACTS). Which of several
+ * read sources carries which fact is not recorded: they stand for their facts jointly.
+ */
 export interface PlantSource {
   title: string
   url: string
