@@ -4,7 +4,7 @@ import { findClientLink } from '@/lib/server/clients/find-client-link'
 import { anonymousContext } from '@/lib/server/people/anonymous-context'
 import { openGarden } from './open-garden'
 
-export const metadata: Metadata = { title: 'An invitation to your garden', robots: { index: false }, referrer: 'no-referrer' }
+export const metadata: Metadata = { title: 'An invitation to your garden', robots: { index: false } }
 
 interface Props {
   params: Promise<{ token: string }>
