@@ -16,10 +16,7 @@ beforeEach(async () => {
   vi.stubGlobal('tenthSummerDb', db)
   browser.cookies.set(SESSION_COOKIE, await createSession(db, 'designer', { studioId: 'studio-a', projectId: null }))
 })
-afterEach(() => {
-  vi.unstubAllGlobals()
-  vi.restoreAllMocks()
-})
+afterEach(() => vi.unstubAllGlobals())
 
 const params = { params: Promise.resolve({}) }
 const post = (body: BodyInit | null, headers: Record<string, string> = {}) =>
@@ -85,6 +82,7 @@ describe('a route handler', () => {
     const { error } = JSON.parse(text)
     expect(error.message).toContain(error.id)
     expect(logged).toHaveBeenCalledWith(expect.objectContaining({ id: error.id, where: 'POST /api/thing' }), 'fault')
+    logged.mockRestore()
   })
 
   it('lets an error carry facts beside its sentence, never over its code', async () => {
