@@ -30,5 +30,10 @@ export function transact<T>(db: Db, work: () => T): T {
   return db.$client.transaction(work).immediate()
 }
 
+/** Runs reads that must agree with each other on one state of the database, whoever writes meanwhile. */
+export function snapshot<T>(db: Db, read: () => T): T {
+  return db.$client.transaction(read).deferred()
+}
+
 /** Where the database stands: DATABASE_FILE, or the usual place beside the product. */
 export const databaseFile = (): string => process.env.DATABASE_FILE ?? './.data/tenth-summer.db'

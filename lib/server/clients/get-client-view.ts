@@ -1,4 +1,5 @@
 import { asc, eq } from 'drizzle-orm'
+import { snapshot } from '@/db/open'
 import { facades, studios } from '@/db/schema'
 import { AppError } from '@/lib/errors'
 import type { Placement, Sheet } from '@/lib/spacing'
@@ -44,12 +45,14 @@ export function getClientView(context: Context, _: Record<string, never> = {}): 
   authorize(context, 'client-view:read')
   const { db, actor } = context
   if (actor.kind !== 'client') throw new AppError('forbidden')
-  const project = findProject(context, actor.projectId)
-  const studio = db.select({ name: studios.name }).from(studios).where(eq(studios.id, actor.studioId)).get()
-  const fronts = db.select().from(facades).where(eq(facades.projectId, project.id)).orderBy(asc(facades.createdAt), asc(facades.id)).all()
-  return {
-    studio: { name: studio?.name ?? '' },
-    project: { name: project.name },
-    facades: fronts.map((facade) => ({ id: facade.id, name: facade.name, sheet: forClient(readSheet(db, { facade, project })) })),
-  }
+  return snapshot(db, () => {
+    const project = findProject(context, actor.projectId)
+    const studio = db.select({ name: studios.name }).from(studios).where(eq(studios.id, actor.studioId)).get()
+    const fronts = db.select().from(facades).where(eq(facades.projectId, project.id)).orderBy(asc(facades.createdAt), asc(facades.id)).all()
+    return {
+      studio: { name: studio?.name ?? '' },
+      project: { name: project.name },
+      facades: fronts.map((facade) => ({ id: facade.id, name: facade.name, sheet: forClient(readSheet(db, { facade, project })) })),
+    }
+  })
 }

@@ -1,6 +1,8 @@
 /** Counted sign-in attempts, in the same database: a restart forgets nothing. */
+import { lt } from 'drizzle-orm'
 import { RateLimiterRes, RateLimiterSQLite } from 'rate-limiter-flexible'
 import type { Db } from '@/db/open'
+import { rateLimits } from '@/db/schema'
 import { AppError } from '@/lib/errors'
 import { hashSecret } from './hashed-sessions'
 
@@ -32,6 +34,7 @@ async function consume(of: RateLimiterSQLite, key: string): Promise<void> {
  * AppError('too-many'). `succeeded` takes the count back once the password was right.
  */
 export async function countAttempt(db: Db, { email, address }: { email: string; address: string }) {
+  db.delete(rateLimits).where(lt(rateLimits.expire, Date.now())).run()
   const accounts = limiter(db, 'account', MAX_PER_ACCOUNT)
   const addresses = limiter(db, 'address', MAX_PER_ADDRESS)
   // What is typed into the address field may be anything, even a password: only its hash is kept.

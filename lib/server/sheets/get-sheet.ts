@@ -1,4 +1,4 @@
-import { transact } from '@/db/open'
+import { snapshot, transact } from '@/db/open'
 import { ENGINE_VERSION, type Finding, type Sheet } from '@/lib/spacing'
 import { authorize } from '../authorize'
 import type { Context } from '../context'
@@ -22,9 +22,9 @@ export interface OpenSheet {
 export function getSheet(context: Context, { facadeId }: { facadeId: string }): OpenSheet {
   authorize(context, 'sheet:read')
   const { db } = context
-  return transact(db, () => {
+  if (findFacade(context, facadeId).facade.engine !== ENGINE_VERSION) transact(db, () => recheck(db, findFacade(context, facadeId)))
+  return snapshot(db, () => {
     const found = findFacade(context, facadeId)
-    if (found.facade.engine !== ENGINE_VERSION) recheck(db, found)
     const { facade, project } = found
     return {
       facade: { id: facade.id, name: facade.name, projectId: project.id, projectName: project.name },
