@@ -93,7 +93,7 @@ function Beside({ tab, onTab }: { tab: TabName; onTab: (tab: TabName) => void })
   const { tool } = useEditorState()
   const isPicking = tool.kind === 'plant'
   return (
-    <aside aria-label="Beside the drawing" className={`flex min-h-0 shrink-0 flex-col border-l border-rule ${!isPicking && tab === 'plants' ? 'w-[36rem]' : 'w-80 xl:w-96'}`}>
+    <aside aria-label="Beside the drawing" className={`flex min-h-0 shrink-0 flex-col border-l border-rule ${!isPicking && tab === 'plants' ? 'w-[37rem]' : 'w-80 xl:w-96'}`}>
       {isPicking ? <PlantPicker onClose={() => editor.setTool({ kind: 'move' })} /> : <SidePanel tab={tab} onTab={onTab} />}
     </aside>
   )

@@ -16,3 +16,4 @@ export const NearerIcon = () => <Sign><path d="M12 6v12M6 12h12" /></Sign>
 export const FartherIcon = () => <Sign><path d="M6 12h12" /></Sign>
 export const FitIcon = () => <Sign><path d="M4 9V5h4M20 9V5h-4M4 15v4h4M20 15v4h-4" /></Sign>
 export const HelpIcon = () => <Sign><path d="M9 9.2a3 3 0 1 1 4.4 2.7c-.9.5-1.4 1-1.4 2.1" /><path d="M12 17.6v.1" /></Sign>
+export const RemoveIcon = () => <Sign><path d="m7 7 10 10M17 7 7 17" /></Sign>

@@ -1,8 +1,9 @@
 'use client'
 /** The selected plant: where it stands, how large it is planted, how large it is kept, what part it plays. */
 import { useId, useState } from 'react'
-import { LengthField, OptionalLengthField } from '@/components/site/length-field'
-import { formatLength } from '@/lib/measure'
+import { LengthField } from '@/components/site/length-field'
+import { TypedField } from '@/components/site/typed-field'
+import { echoLength, formatLength, parseLength } from '@/lib/measure'
 import { plantKeys } from '@/lib/sheet'
 import { matureSize, ROLES_IN_BED, STATUSES, wallDistance, type Placement, type PlacementRole, type PlacementStatus, type Sheet, type Size } from '@/lib/spacing'
 import { outFromWall } from './editor'
@@ -16,7 +17,6 @@ interface CommittedProps<T> {
   label: string
   value: T
   readOnly: boolean
-  hint?: string
   /** Takes the value; answers what is wrong with it. */
   onCommit: (value: T) => string | null
 }
@@ -41,12 +41,26 @@ function useDraft<T>({ value, onCommit }: Pick<CommittedProps<T>, 'value' | 'onC
   }
 }
 
-function Committed({ label, readOnly, hint, ...rest }: CommittedProps<number>) {
-  return <LengthField label={label} units="imperial" readOnly={readOnly} {...(hint && { hint })} {...useDraft(rest)} />
+function Committed({ label, readOnly, ...rest }: CommittedProps<number>) {
+  return <LengthField label={label} units="imperial" readOnly={readOnly} {...useDraft(rest)} />
 }
 
-function CommittedOptional({ label, readOnly, hint, ...rest }: CommittedProps<number | undefined>) {
-  return <OptionalLengthField label={label} units="imperial" readOnly={readOnly} {...(hint && { hint })} {...useDraft(rest)} />
+/** A kept size: empty means the plant is never clipped. */
+function KeptField({ label, readOnly, ...rest }: CommittedProps<number | undefined>) {
+  return (
+    <TypedField<number | undefined>
+      label={label}
+      readOnly={readOnly}
+      read={(text) => {
+        if (text.trim() === '') return { ok: true, value: undefined }
+        const read = parseLength(text)
+        return read.ok ? { ok: true, value: read.inches } : read
+      }}
+      write={(inches) => (inches === undefined ? '' : formatLength(inches))}
+      echo={(inches) => (inches === undefined ? 'never clipped' : echoLength(inches))}
+      {...useDraft(rest)}
+    />
+  )
 }
 
 interface ChoiceProps<T extends string> {
@@ -155,8 +169,8 @@ export function PlantForm() {
         <Committed label="From the wall" readOnly={readOnly} value={wallDistance(sheet.facade, placement.x, placement.y)} onCommit={(out) => put({ ...placement, y: outFromWall(sheet.facade, placement.x, out) }, 'moved from the wall')} />
         <Committed label={status === 'new' ? 'Planted height' : 'Height today'} readOnly={readOnly} value={planted.height} onCommit={(height) => put({ ...placement, planted: { ...planted, height } }, 'planted height')} />
         <Committed label={status === 'new' ? 'Planted spread' : 'Spread today'} readOnly={readOnly} value={planted.spread} onCommit={(spread) => put({ ...placement, planted: { ...planted, spread } }, 'planted spread')} />
-        <CommittedOptional label="Kept height" hint="empty: never clipped" readOnly={readOnly} value={kept?.height} onCommit={(height) => put(withKept(placement, { height }), 'kept height')} />
-        <CommittedOptional label="Kept spread" hint="empty: never clipped" readOnly={readOnly} value={kept?.spread} onCommit={(spread) => put(withKept(placement, { spread }), 'kept spread')} />
+        <KeptField label="Kept height" readOnly={readOnly} value={kept?.height} onCommit={(height) => put(withKept(placement, { height }), 'kept height')} />
+        <KeptField label="Kept spread" readOnly={readOnly} value={kept?.spread} onCommit={(spread) => put(withKept(placement, { spread }), 'kept spread')} />
         <Choice label="Part it plays" value={role} choices={ROLES_IN_BED} words={ROLE_WORDS} readOnly={readOnly} onChoice={(next) => put({ ...placement, role: next }, 'part it plays')} />
         <DriftField value={placement.drift ?? ''} readOnly={readOnly} onCommit={(drift) => put(withDrift(placement, drift), 'drift')} />
       </div>

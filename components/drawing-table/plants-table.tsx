@@ -4,6 +4,7 @@ import { plantKeys } from '@/lib/sheet'
 import { wallDistance, type Placement, type Sheet } from '@/lib/spacing'
 import { alongWall, outFromWall } from './editor'
 import { useDesk, useEditorState } from './desk-context'
+import { RemoveIcon } from './icons'
 import { LengthCell, QUIET, STRONG } from './parts'
 
 interface RowProps {
@@ -24,8 +25,8 @@ function PlacementRow({ sheet, placement, keyLetter, isSelected }: RowProps) {
   const { planted } = placement
   return (
     <tr data-placement={placement.id} data-selected={isSelected || undefined} className="border-b border-rule align-top data-selected:bg-sheet data-selected:shadow-[inset_3px_0_0_var(--color-leaf)]">
-      <th scope="row" className="min-w-40 text-left font-normal">
-        <button type="button" aria-pressed={isSelected} onClick={() => editor.select(isSelected ? null : placement.id)} className={`${QUIET} w-full justify-start text-left no-underline`}>
+      <th scope="row" className="min-w-36 py-1 text-left font-normal">
+        <button type="button" aria-pressed={isSelected} onClick={() => editor.select(isSelected ? null : placement.id)} className="flex min-h-11 w-full items-center gap-2 rounded-sm px-1 text-left leading-tight focus-visible:outline-2 focus-visible:outline-leaf">
           <span className="grid size-6 shrink-0 place-items-center rounded-full border border-ink text-sm font-bold">{keyLetter || '-'}</span>
           <span>
             <span className="block">{common}</span>
@@ -34,13 +35,13 @@ function PlacementRow({ sheet, placement, keyLetter, isSelected }: RowProps) {
           </span>
         </button>
       </th>
-      <td><LengthCell {...cell} label={`${name}, along the wall`} value={placement.x} onCommit={(x) => put({ x }, 'moved along the wall')} /></td>
+      <td><LengthCell {...cell} className="w-22" label={`${name}, along the wall`} value={placement.x} onCommit={(x) => put({ x }, 'moved along the wall')} /></td>
       <td>
-        <LengthCell {...cell} label={`${name}, from the wall`} value={wallDistance(facade, placement.x, placement.y)} onCommit={(out) => put({ y: outFromWall(facade, placement.x, out) }, 'moved from the wall')} />
+        <LengthCell {...cell} className="w-22" label={`${name}, from the wall`} value={wallDistance(facade, placement.x, placement.y)} onCommit={(out) => put({ y: outFromWall(facade, placement.x, out) }, 'moved from the wall')} />
       </td>
       <td><LengthCell {...cell} className="w-20" label={`${name}, height when planted`} value={planted.height} onCommit={(height) => put({ planted: { ...planted, height } }, 'planted height')} /></td>
       <td><LengthCell {...cell} className="w-20" label={`${name}, spread when planted`} value={planted.spread} onCommit={(spread) => put({ planted: { ...planted, spread } }, 'planted spread')} /></td>
-      {editor.canEdit ? <td><button type="button" aria-label={`Remove ${name}`} onClick={() => editor.remove(placement.id)} className={QUIET}>Remove</button></td> : null}
+      {editor.canEdit ? <td><button type="button" aria-label={`Remove ${name}`} onClick={() => editor.remove(placement.id)} title={`Remove ${name}`} className={`${QUIET} px-0`}><RemoveIcon /></button></td> : null}
     </tr>
   )
 }
@@ -56,7 +57,7 @@ export function PlantsTable() {
       {editor.canEdit ? <button type="button" onClick={page.openPlants} className={`${STRONG} mb-3`}>Add a plant</button> : null}
       <div className="overflow-x-auto">
         <table id="plants-table" data-testid="plants-table" className="w-full text-[15px] [&_td]:py-1 [&_td]:pr-1 [&_thead_th]:pr-2 [&_thead_th]:pb-1 [&_thead_th]:text-left [&_thead_th]:align-bottom [&_thead_th]:text-sm">
-          <caption className="pb-2 text-left text-ink-soft">{rows.length === 1 ? 'One plant' : `${rows.length} plants`}, from the left corner to the right. Lengths as the crew measures them.</caption>
+          <caption className="pb-2 text-left text-ink-soft">{rows.length === 1 ? 'One plant' : `${rows.length} plants`}, from the left corner to the right.</caption>
           <thead>
             <tr>
               <th scope="col">Plant</th><th scope="col">Along the wall</th><th scope="col">From the wall</th><th scope="col">Planted height</th><th scope="col">Planted spread</th>

@@ -9,7 +9,7 @@ import { PlantsTable } from './plants-table'
 export const TABS = ['findings', 'plants', 'plant'] as const
 export type TabName = (typeof TABS)[number]
 
-const TAB = 'min-h-11 border-b-3 border-transparent px-3 focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-leaf data-[state=active]:border-leaf data-[state=active]:font-bold data-[state=inactive]:text-ink-soft'
+const TAB = 'min-h-11 border-b-3 border-transparent px-2.5 whitespace-nowrap focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-leaf data-[state=active]:border-leaf data-[state=active]:font-bold data-[state=inactive]:text-ink-soft'
 const PAGE = 'min-h-0 flex-1 overflow-y-auto focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-leaf'
 
 export function SidePanel({ tab, onTab }: { tab: TabName; onTab: (tab: TabName) => void }) {

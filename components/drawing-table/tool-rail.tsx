@@ -4,7 +4,7 @@ import { useDesk, useEditorState } from './desk-context'
 import { FartherIcon, FitIcon, HelpIcon, MoveIcon, NearerIcon, PickUpIcon, PlantIcon } from './icons'
 import { BUTTON, CommandButton } from './parts'
 
-const TOOL = `${BUTTON} min-h-14 w-full flex-col gap-0.5 px-1 text-[13px] leading-tight hover:bg-sheet aria-disabled:text-ink-soft`
+const TOOL = `${BUTTON} min-h-14 w-full flex-col gap-0.5 px-0.5 text-[13px] whitespace-nowrap leading-tight hover:bg-sheet aria-disabled:text-ink-soft`
 
 function ToolButton({ isOn, onPress, children }: { isOn: boolean; onPress: () => void; children: React.ReactNode }) {
   return (
@@ -25,7 +25,7 @@ export function ToolRail() {
           <ToolButton isOn={tool.kind === 'plant'} onPress={page.openPlants}><PlantIcon />Plant</ToolButton>
           <CommandButton id="pick-up" label="Pick up the selected plant, then tap where it goes" className={TOOL}><PickUpIcon />Pick up</CommandButton>
           <ToolButton isOn={grid === 1} onPress={() => editor.setGrid(grid === 1 ? 1 / 64 : 1)}>
-            <span className="font-mono text-base">1 in</span>Snap
+            <span className="font-mono text-base leading-6">{grid === 1 ? '1 in' : '1/64'}</span>Snap
           </ToolButton>
         </>
       ) : null}

@@ -12,6 +12,8 @@ import { onThemeChange, readTheme } from './theme'
 /** Labels are placed for the scale they are seen at, once it has been still for so long. */
 const SETTLE_MS = 140
 
+const FAINT = 0.4
+
 type Shapes = () => readonly Shape[]
 type Views = 'elevation' | 'plan'
 
@@ -113,6 +115,7 @@ export class Board {
     const { elevation, plan } = this.scene
     this.desk.viewport.frame(this.scene.box)
     const { ground, plants, labels } = this.layers
+    labels.opacity(1)
     const fill = (layer: Konva.Layer, ...nodes: (Konva.Shape | Konva.Group)[]) => {
       layer.destroyChildren()
       layer.add(...nodes)
@@ -149,7 +152,7 @@ export class Board {
   }
 
   private lift(id: string): void {
-    const { overlay, plants } = this.layers
+    const { overlay, plants, labels } = this.layers
     const find = (drawings: readonly PlantDrawing[]) => drawings.find(({ placement }) => placement === id)
     const [elevation, plan] = [find(this.scene.elevation.plants), find(this.scene.plan.plants)]
     if (!elevation || !plan) return
@@ -163,6 +166,9 @@ export class Board {
       return drag ? movingShapes(drag, held, this.scene, { sheet, scale: this.pen.scale }) : []
     }))
     plants.batchDraw()
+    // Keys stay where they are till the drop: they step back so that none seems to belong to the empty place.
+    labels.opacity(FAINT)
+    labels.batchDraw()
   }
 
   /** Nothing moves: the overlay shows what is selected. A plant put back returns to its place. */
