@@ -16,7 +16,10 @@ export function HelpDialog({ isOpen, onClose }: { isOpen: boolean; onClose: () =
   const shown = COMMANDS.filter(({ edits }) => editor.canEdit || !edits)
   return (
     <dialog ref={dialog} onClose={onClose} aria-labelledby="help-title" className="m-auto max-h-[85dvh] w-[min(40rem,92vw)] border border-ink bg-sheet p-6 text-ink backdrop:bg-ink/40">
-      <h2 id="help-title" className="font-heading text-2xl">Keys of the drawing</h2>
+      <div className="flex items-start justify-between gap-4">
+        <h2 id="help-title" className="font-heading text-2xl">Keys of the drawing</h2>
+        <button type="button" onClick={onClose} className={PLAIN}>Close</button>
+      </div>
       <p className="mt-1 text-ink-soft">They work while the drawing has the focus. By finger: tap a plant to select it, tap it again to pick it up, tap where it goes. Two fingers pan and zoom.</p>
       <div className="mt-4 grid gap-x-8 gap-y-4 sm:grid-cols-2">
         {COMMAND_GROUPS.map((group) => {
@@ -36,7 +39,6 @@ export function HelpDialog({ isOpen, onClose }: { isOpen: boolean; onClose: () =
           )
         })}
       </div>
-      <button type="button" onClick={onClose} className={`${PLAIN} mt-5`}>Close</button>
     </dialog>
   )
 }
