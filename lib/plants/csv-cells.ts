@@ -35,13 +35,13 @@ export class Cells {
     return text
   }
 
-  /** A length; bare numbers are inches. */
-  length(column: CsvColumn): number {
+  /** A length; bare numbers are inches. `otherwise` is answered for a bad one: it must not disturb its pair. */
+  length(column: CsvColumn, otherwise: number): number {
     const text = this.text(column)
     const read = text === '' ? { ok: false as const, message: 'Empty: give a number of inches.' } : parseLength(text)
     if (read.ok) return read.inches
     this.refuse(column, read.message)
-    return 1
+    return otherwise
   }
 
   zone(column: CsvColumn): number | null {

@@ -2,7 +2,7 @@
 import { Cells, type CsvProblem } from './csv-cells'
 import { columnOf } from './csv-columns'
 import { FACTS } from './facts'
-import { plantInputSchema, type PlantInput } from './schema'
+import { MAX_PLANT_IN, plantInputSchema, type PlantInput } from './schema'
 import {
   BIRD_VALUES, BLOOM_COLORS, CATEGORIES, DEER_CLASSES, FALL_COLORS, FOLIAGE_COLORS, GROWTHS, HABITS, JUGLONES, LEAVES,
   LIGHTS, NATIVE_REGIONS, PRUNES, TEXTURES, TOXICITIES, WATERS,
@@ -29,10 +29,10 @@ function readCells(cells: Cells): PlantInput {
     common: cells.text('common'),
     category: cells.choice('category', CATEGORIES),
     leaf: cells.choice('leaf', LEAVES),
-    heightMin: cells.length('height_min'),
-    heightMax: cells.length('height_max'),
-    spreadMin: cells.length('spread_min'),
-    spreadMax: cells.length('spread_max'),
+    heightMin: cells.length('height_min', Number.MIN_VALUE),
+    heightMax: cells.length('height_max', MAX_PLANT_IN),
+    spreadMin: cells.length('spread_min', Number.MIN_VALUE),
+    spreadMax: cells.length('spread_max', MAX_PLANT_IN),
     habit: cells.choice('habit', HABITS),
     growth: cells.choice('growth', GROWTHS),
     zoneMin: cells.zone('zone_min'),

@@ -6,6 +6,8 @@ import { readPlantRow } from './csv-row'
 import { nameKey } from './name-key'
 import type { PlantInput } from './schema'
 
+export type { CsvProblem }
+
 export const MAX_CSV_ROWS = 2_000
 export const MAX_CSV_BYTES = 1_048_576
 
