@@ -144,7 +144,7 @@ export class SaveQueue extends Observable<SaveState> {
 
   /** Takes the server's sheet where nothing waits here. */
   readonly adopt = (served: Served): void => {
-    if (this.edits.length === 0 && !this.inFlight) this.take(served, [])
+    if (this.edits.length === 0) this.take(served, [])
   }
 
   private take(served: Served, dropped: readonly WaitingEdit[]): void {
