@@ -12,7 +12,7 @@ import { onThemeChange, readTheme } from './theme'
 /** Labels are placed for the scale they are seen at, once it has been still for so long. */
 const SETTLE_MS = 140
 
-const FAINT = 0.4
+const FAINT = 0.35
 
 type Shapes = () => readonly Shape[]
 type Views = 'elevation' | 'plan'
@@ -30,6 +30,7 @@ export class Board {
   private scene: Scene
   private labelScale: number
   private held: Carried | null = null
+  private keys: Konva.Shape | null = null
   private frame = 0
   private settling: ReturnType<typeof setTimeout> | undefined
   private readonly stops: (() => void)[] = []
@@ -115,7 +116,6 @@ export class Board {
     const { elevation, plan } = this.scene
     this.desk.viewport.frame(this.scene.box)
     const { ground, plants, labels } = this.layers
-    labels.opacity(1)
     const fill = (layer: Konva.Layer, ...nodes: (Konva.Shape | Konva.Group)[]) => {
       layer.destroyChildren()
       layer.add(...nodes)
@@ -123,7 +123,9 @@ export class Board {
     fill(ground, this.painted(() => [...elevation.ground, ...plan.ground]))
     this.groups.clear()
     fill(plants, ...this.plantGroups('elevation', elevation.plants), ...this.plantGroups('plan', plan.plants))
-    fill(labels, this.painted(() => [...elevation.limits, ...plan.limits]), this.painted(() => [...elevation.labels, ...plan.labels]))
+    const all = [...elevation.labels, ...plan.labels]
+    this.keys = this.painted(() => all.filter(({ kind }) => kind !== 'text'))
+    fill(labels, this.painted(() => [...elevation.limits, ...plan.limits]), this.keys, this.painted(() => all.filter(({ kind }) => kind === 'text')))
     this.held = null
     this.show()
     this.move()
@@ -167,7 +169,7 @@ export class Board {
     }))
     plants.batchDraw()
     // Keys stay where they are till the drop: they step back so that none seems to belong to the empty place.
-    labels.opacity(FAINT)
+    this.keys?.opacity(FAINT)
     labels.batchDraw()
   }
 
