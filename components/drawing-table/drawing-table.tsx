@@ -30,31 +30,49 @@ interface Props {
   canListPlants: boolean
 }
 
+/** Desks of this tab by facade: one that still has edits waiting is gone on with, not opened beside itself. */
+const desks = new Map<string, Desk>()
+/** Sheets a desk has been opened on: met again, after a step back in the browser, they are old. */
+const seen = new WeakSet<Sheet>()
+
 function makeDesk({ facade, sheet, seq, report, canEdit }: Props): Desk {
-  const hasDatabase = typeof indexedDB !== 'undefined'
+  const isBrowser = typeof window !== 'undefined'
+  const live = isBrowser ? desks.get(facade.id) : undefined
+  if (live && live.queue.unsaved.length > 0) return live
   return createDesk({
     facade: facade.id, sheet, seq, report, canEdit, newId, clock: systemClock, calls: saveCalls(facade.id),
-    store: hasDatabase ? new IdbQueueStore(lockWatch(), systemClock.now) : new MemoryQueueStore(),
+    store: isBrowser && 'indexedDB' in window ? new IdbQueueStore(lockWatch(), systemClock.now) : new MemoryQueueStore(),
   })
 }
 
 /** Desks already open: an effect may run twice, edits may not be claimed twice. */
 const opened = new WeakSet<Desk>()
 
-function useOpenDesk(desk: Desk) {
+function useOpenDesk(desk: Desk, facade: string, sheet: Sheet) {
   useEffect(() => {
+    desks.set(facade, desk)
     if (!opened.has(desk)) {
       opened.add(desk)
       void openDesk(desk)
+      if (seen.has(sheet)) void desk.refresh()
+      seen.add(sheet)
     }
     const { queue } = desk
-    window.addEventListener('online', queue.wake)
-    window.addEventListener('focus', queue.wake)
-    return () => {
-      window.removeEventListener('online', queue.wake)
-      window.removeEventListener('focus', queue.wake)
+    const shown = (event: PageTransitionEvent) => {
+      if (event.persisted) void desk.refresh()
     }
-  }, [desk])
+    const leaving = (event: BeforeUnloadEvent) => {
+      const { waiting, isLasting } = queue.getSnapshot()
+      if (waiting > 0 && !isLasting) event.preventDefault()
+    }
+    const ears = new AbortController()
+    const { signal } = ears
+    window.addEventListener('online', queue.wake, { signal })
+    window.addEventListener('focus', queue.wake, { signal })
+    window.addEventListener('pageshow', shown, { signal })
+    window.addEventListener('beforeunload', leaving, { signal })
+    return () => ears.abort()
+  }, [desk, facade, sheet])
 }
 
 export function DrawingTable(props: Props) {
@@ -62,7 +80,7 @@ export function DrawingTable(props: Props) {
   const [queries] = useState(() => new QueryClient())
   const [tab, setTab] = useState<TabName>('findings')
   const [isHelpOpen, setHelpOpen] = useState(false)
-  useOpenDesk(desk)
+  useOpenDesk(desk, props.facade.id, props.sheet)
   const page = useMemo(() => ({
     openHelp: () => setHelpOpen(true),
     openPlants: () => desk.editor.setTool({ kind: 'plant', plant: null }),

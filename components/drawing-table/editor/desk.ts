@@ -10,6 +10,8 @@ export interface Desk {
   editor: Editor
   queue: SaveQueue
   viewport: Viewport
+  /** Shows the server's sheet as it is now, unless something waits here. */
+  refresh: () => Promise<void>
 }
 
 interface Options {
@@ -29,8 +31,8 @@ export function createDesk(options: Options): Desk {
   const { facade, sheet, seq, report, canEdit, newId, store, calls, clock } = options
   const editor: Editor = new Editor({ sheet, report, canEdit, newId, send: (edits) => queue.push(edits) })
 
+  // Others have changed things this page has not seen: their sheet is fetched and shown once nothing newer waits.
   let isBehind = false
-  /** Others have changed things this page has not seen: their sheet is fetched and shown, if nothing newer waits. */
   const refresh = async () => {
     const answer = await calls.readSheet()
     if (answer.ok && queue.unsaved.length === 0) queue.adopt(answer.value)
@@ -48,7 +50,7 @@ export function createDesk(options: Options): Desk {
     facade, editor: newId(), base: seq, store, calls, clock,
     events: { saved, refused: (edit, _message, rest) => editor.refused(edit, rest), served: editor.served },
   })
-  return { editor, queue, viewport: new Viewport() }
+  return { editor, queue, viewport: new Viewport(), refresh }
 }
 
 /** Brings back what an earlier page could not send, and begins to send. A read-only desk sends nothing. */
