@@ -1,4 +1,5 @@
-import { and, asc, count, desc, eq, inArray, isNotNull, isNull, lte, or, sql, type SQL } from 'drizzle-orm'
+import { and, asc, count, desc, eq, getTableColumns, inArray, isNotNull, isNull, lte, or, sql, type SQL } from 'drizzle-orm'
+import type { SQLiteSelect } from 'drizzle-orm/sqlite-core'
 import { plants } from '@/db/schema'
 import { DEER_CLASSES, EVERY_PLANT, searchExpression, type LibraryPlant, type PlantQuery } from '@/lib/plants'
 import { authorize } from '../authorize'
@@ -23,8 +24,6 @@ function isBrowsedAtMost(deer: (typeof DEER_CLASSES)[number]): SQL {
   return deer === 'unknown' ? eq(plants.deer, deer) : inArray(plants.deer, BROWSED.slice(0, BROWSED.indexOf(deer) + 1))
 }
 
-const isNamed = (expression: string) => sql`${plants.id} in (select plant_id from ${FTS} where ${FTS} match ${expression})`
-
 function isHardyIn(zone: number): SQL | undefined {
   const isColdEnough = or(isNull(plants.zoneMin), lte(plants.zoneMin, zone))
   const isWarmEnough = or(isNull(plants.zoneMax), sql`${plants.zoneMax} >= ${zone}`)
@@ -37,7 +36,7 @@ function conditionOf(query: PlantQuery, studioId: string): SQL | undefined {
   return and(
     isVisibleTo(studioId),
     owner === '' ? undefined : owner === 'own' ? isNotNull(plants.studioId) : isNull(plants.studioId),
-    expression === null ? undefined : isNamed(expression),
+    expression === null ? undefined : sql`${FTS} match ${expression}`,
     category === '' ? undefined : eq(plants.category, category),
     leaf === '' ? undefined : leaf === 'evergreen' ? inArray(plants.leaf, [...EVERGREENS]) : eq(plants.leaf, leaf),
     heightMax === null ? undefined : lte(plants.heightMax, heightMax),
@@ -51,17 +50,14 @@ function conditionOf(query: PlantQuery, studioId: string): SQL | undefined {
 }
 
 /** The name's closeness to the words asked; a botanical name counts above a common one. */
-const closeness = (expression: string) =>
-  sql`(select bm25(${FTS}, 0, 2, 1) from ${FTS} where ${FTS} match ${expression} and plant_id = ${plants.id})`
+const closeness = sql`bm25(${FTS}, 0, 2, 1)`
 
 const byName = sql`${plants.botanical} collate nocase`
 
 function sortKeys({ sort, q }: PlantQuery): SQL[] {
   switch (sort) {
-    case 'match': {
-      const expression = searchExpression(q)
-      return expression === null ? [byName] : [closeness(expression)]
-    }
+    case 'match':
+      return searchExpression(q) === null ? [byName] : [closeness]
     case 'botanical':
       return [byName]
     case 'common':
@@ -82,6 +78,13 @@ function orderOf(query: PlantQuery): SQL[] {
   return [...sortKeys(query).map(turn), asc(byName), asc(plants.id)]
 }
 
+/** Narrows a selection of plants, in place: joined with the index of names where words are asked. */
+function narrow<T extends SQLiteSelect>(selection: T, query: PlantQuery, studioId: string): T {
+  if (searchExpression(query.q) !== null) selection.innerJoin(FTS, sql`${FTS}.plant_id = ${plants.id}`)
+  selection.where(conditionOf(query, studioId))
+  return selection
+}
+
 /**
  * Plants of the shared library and of the actor's studio that fit: words by their beginnings in either name, filters,
  * order, one page. Whatever is typed for words, the search is sound; see PlantQuery for what each filter means.
@@ -90,10 +93,13 @@ export function searchPlants(context: Context, asked: Partial<PlantQuery>): Foun
   authorize(context, 'plant:read')
   const query = { ...EVERY_PLANT, ...asked }
   const { db, actor } = context
-  const isWanted = conditionOf(query, actor.studioId)
-  const total = db.select({ total: count() }).from(plants).where(isWanted).get()?.total ?? 0
+  const total = narrow(db.select({ total: count() }).from(plants).$dynamic(), query, actor.studioId).get()?.total ?? 0
   const pages = Math.max(1, Math.ceil(total / query.pageSize))
   const page = Math.min(query.page, pages)
-  const rows = db.select().from(plants).where(isWanted).orderBy(...orderOf(query)).limit(query.pageSize).offset((page - 1) * query.pageSize).all()
+  const rows = narrow(db.select(getTableColumns(plants)).from(plants).$dynamic(), query, actor.studioId)
+    .orderBy(...orderOf(query))
+    .limit(query.pageSize)
+    .offset((page - 1) * query.pageSize)
+    .all()
   return { plants: withSources(db, rows), total, page, pages }
 }
