@@ -3,6 +3,7 @@ import { readdirSync, readFileSync } from 'node:fs'
 import { join, relative } from 'node:path'
 import { beforeEach, describe, expect, it, vi } from 'vitest'
 import type { Db } from '@/db/open'
+import { csvTemplate } from '@/lib/plants/csv-columns'
 import { createSession, SESSION_COOKIE } from '@/lib/server/people/session'
 import { getSheet } from '@/lib/server/sheets/get-sheet'
 import { actorNamed, addStudios, contextOf, placementAt, put } from '../support/actors'
@@ -41,6 +42,8 @@ async function enterAs(viewer: Viewer): Promise<void> {
 function bodyOf({ body }: RouteEndpoint): unknown {
   if (body === 'sheet') return getSheet(contextOf(db, 'owner'), { facadeId: 'facade-a' }).sheet
   if (body === 'edits') return { base: 0, editor: 'test', edits: [put(1, placementAt('p1', 60))] }
+  if (body === 'import') return { text: csvTemplate(), mode: 'good-rows' }
+  if (body === 'preview') return { text: csvTemplate() }
   return {}
 }
 

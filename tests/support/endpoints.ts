@@ -20,7 +20,7 @@ export interface RouteEndpoint {
   file: string
   method: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE'
   path: (ids: Ids) => string
-  body?: 'sheet' | 'edits' | 'plants-csv'
+  body?: 'sheet' | 'edits' | 'import' | 'preview'
   status: For<number>
   /** Asked by the owner's browser, from a page of another site. */
   crossSite: number
@@ -51,6 +51,9 @@ const readByMembers = status([200, 200, 200, 200], { stranger: 404 })
 /** Things every member of any studio may ask. */
 const openToMembers = status([200, 200, 200, 200], { stranger: 200 })
 
+/** What owners and designers may change, each in their own studio. */
+const madeByEditors = status([200, 200, 403, 403], { stranger: 200 })
+
 const facade = (rest: string) => ({ facadeId }: Ids) => `/api/facades/${facadeId}/${rest}`
 
 export const ROUTES: RouteEndpoint[] = [
@@ -60,21 +63,25 @@ export const ROUTES: RouteEndpoint[] = [
   { file: 'app/api/facades/[id]/findings/route.ts', method: 'GET', path: facade('findings'), status: readByMembers, crossSite: 200 },
   { file: 'app/api/facades/[id]/plant-list/route.ts', method: 'GET', path: facade('plant-list?format=csv'), status: readByMembers, crossSite: 200 },
   { file: 'app/api/facades/[id]/edits/route.ts', method: 'POST', path: facade('edits'), body: 'edits', status: status([200, 200, 403, 403], { stranger: 404 }), crossSite: 403 },
+  { file: 'app/api/plants/route.ts', method: 'GET', path: () => '/api/plants?q=ilex', status: openToMembers, crossSite: 200 },
+  { file: 'app/api/plants/[id]/route.ts', method: 'GET', path: ({ plantId }) => `/api/plants/${plantId}`, status: readByMembers, crossSite: 200 },
+  { file: 'app/api/plants/import/route.ts', method: 'POST', path: () => '/api/plants/import', body: 'import', status: madeByEditors, crossSite: 403 },
+  { file: 'app/api/plants/import/preview/route.ts', method: 'POST', path: () => '/api/plants/import/preview', body: 'preview', status: madeByEditors, crossSite: 403 },
+  { file: 'app/api/plants/import/template/route.ts', method: 'GET', path: () => '/api/plants/import/template', status: madeByEditors, crossSite: 200 },
 ]
 
 /** A page for members: clients go to their own page, whoever is signed out to the sign-in. */
 const members = (who: Partial<For<PageOutcome>> = {}): For<PageOutcome> => ({
   owner: 'shown', designer: 'shown', reviewer: 'shown', estimator: 'shown', client: '/view', otherClient: '/view', stranger: 'shown', nobody: '/sign-in', ...who,
 })
+const everyone = (outcome: PageOutcome): For<PageOutcome> => Object.fromEntries(VIEWERS.map((viewer) => [viewer, outcome])) as For<PageOutcome>
 const ofTheStudio = (who: Partial<For<PageOutcome>> = {}) => members({ stranger: 'absent', ...who })
-const EDITORS = { reviewer: 'refused', estimator: 'refused' } as const
-
-const project = (rest = '') => ({ projectId }: Ids) => `/projects/${projectId}${rest}`
 const drawing = (rest = '') => ({ projectId, facadeId }: Ids) => `/projects/${projectId}/facades/${facadeId}${rest}`
 
 export const PAGES: PageEndpoint[] = [
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/page.tsx', path: drawing(), outcome: ofTheStudio() },
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/measure/page.tsx', path: drawing('/measure'), outcome: ofTheStudio() },
+  { file: 'app/(public)/c/[token]/page.tsx', path: () => '/c/never-made', outcome: everyone('shown') },
   { file: 'app/(client)/view/page.tsx', path: () => '/view', outcome: members({ owner: '/projects', designer: '/projects', reviewer: '/projects', estimator: '/projects', stranger: '/projects', client: 'shown', otherClient: 'shown' }) },
 ]
 
@@ -82,5 +89,3 @@ export const ACTIONS: ActionEndpoint[] = [
   { file: 'app/(public)/c/[token]/open-garden.ts', actions: { openGarden: null } },
 ]
 
-void project
-void EDITORS
