@@ -17,8 +17,8 @@ export const libraryPlantId = (botanical: string): string => v5(nameKey(botanica
 
 /** Every column of a plant but its id and the day it came, taken from the row that was to be inserted. */
 function newFacts() {
-  const { id: _id, createdAt: _createdAt, studioId: _studioId, ...facts } = getTableColumns(plants)
-  return Object.fromEntries(Object.entries(facts).map(([key, column]) => [key, sql.raw(`excluded."${column.name}"`)]))
+  const facts = Object.entries(getTableColumns(plants)).filter(([key]) => !['id', 'studioId', 'createdAt'].includes(key))
+  return Object.fromEntries(facts.map(([key, column]) => [key, sql.raw(`excluded."${column.name}"`)]))
 }
 
 function putPlant(db: Db, { plant }: CsvRow, now: number) {

@@ -9,3 +9,5 @@ export {
   BLOOM_FILTERS, EVERY_PLANT, isNarrowed, LEAF_FILTERS, OWNERS, PAGE_SIZE, plantQueryText, readPlantQuery,
   type PlantQuery, type PlantSort, type QueryProblem,
 } from './query'
+export { DEER_WORDS, factGroups, rangeText, wordOf, zonesText, type FactLine } from './words'
+export { EMPTY_FORM, formValuesOf, plantFormSchema, type PlantFormValues } from './form'

@@ -1,0 +1,25 @@
+import type { Metadata, Route } from 'next'
+import { redirect } from 'next/navigation'
+import { BotanicalName } from '@/components/plants/botanical-name'
+import { PlantForm } from '@/components/plants/plant-form'
+import { can } from '@/lib/access'
+import { requireContext } from '@/lib/server/people/require-context'
+import { enteredPlantOf } from '@/lib/server/plants/save-plant'
+import { savePlantAction } from '../../actions'
+import { readPlant } from '../../read-plant'
+
+export const metadata: Metadata = { title: 'Change a plant' }
+
+export default async function EditPlantPage({ params }: { params: Promise<{ plantId: string }> }) {
+  const { plantId } = await params
+  const context = await requireContext()
+  const plant = readPlant(context, plantId)
+  if (plant.studioId === null || !can(context.actor.role, 'plant:edit')) redirect(`/plants/${plantId}` as Route)
+  return (
+    <main className="px-4 py-6">
+      <h1 className="font-heading text-3xl">Change <BotanicalName name={plant.botanical} /></h1>
+      <p className="mb-4 max-w-prose text-ink-soft">Drawings on which it stands are checked again with the new figures.</p>
+      <PlantForm plant={enteredPlantOf(plant)} save={savePlantAction.bind(null, plantId)} back={`/plants/${plantId}`} />
+    </main>
+  )
+}

@@ -1,0 +1,64 @@
+import type { Metadata, Route } from 'next'
+import Link from 'next/link'
+import { BotanicalName } from '@/components/plants/botanical-name'
+import { Cautions } from '@/components/plants/cautions'
+import { FactList, SourceList } from '@/components/plants/fact-list'
+import { MonthsStrip } from '@/components/plants/months-strip'
+import { CARD, HEADING, PLAIN } from '@/components/plants/parts'
+import { RemovePlant } from '@/components/plants/remove-plant'
+import { SizeFigure } from '@/components/plants/size-figure'
+import { can } from '@/lib/access'
+import { requireContext } from '@/lib/server/people/require-context'
+import { removePlantAction } from '../actions'
+import { readPlant } from '../read-plant'
+
+interface Props {
+  params: Promise<{ plantId: string }>
+}
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { plantId } = await params
+  return { title: readPlant(await requireContext(), plantId).botanical }
+}
+
+export default async function PlantPage({ params }: Props) {
+  const { plantId } = await params
+  const context = await requireContext()
+  const plant = readPlant(context, plantId)
+  const canEdit = plant.studioId !== null && can(context.actor.role, 'plant:edit')
+  return (
+    <main className="grid gap-4 px-4 py-6">
+      <div>
+        <Link href={'/plants' as Route} className="inline-flex min-h-11 items-center underline underline-offset-4">Plants</Link>
+        <div className="flex flex-wrap items-start justify-between gap-3">
+          <div>
+            <h1 className="font-heading text-4xl"><BotanicalName name={plant.botanical} /></h1>
+            <p className="text-xl">{plant.common}</p>
+            <p className="text-ink-soft">{plant.studioId === null ? 'Shared library' : 'Your studio’s own'}</p>
+          </div>
+          {canEdit && (
+            <div className="flex flex-wrap items-center gap-3">
+              <Link href={`/plants/${plantId}/edit` as Route} className={PLAIN}>Change plant</Link>
+              <RemovePlant remove={removePlantAction.bind(null, plantId)} />
+            </div>
+          )}
+        </div>
+      </div>
+      <div className="grid gap-4 lg:grid-cols-[3fr_2fr]">
+        <section className={CARD} aria-label="Full-grown size">
+          <h2 className={HEADING}>Full grown</h2>
+          <SizeFigure plant={plant} />
+        </section>
+        <div className="grid content-start gap-4">
+          <Cautions plant={plant} />
+          <section className={CARD} aria-label="Through the months">
+            <h2 className={`${HEADING} mb-2`}>Through the months</h2>
+            <MonthsStrip plant={plant} />
+          </section>
+        </div>
+      </div>
+      <FactList plant={plant} />
+      <SourceList plant={plant} />
+    </main>
+  )
+}
