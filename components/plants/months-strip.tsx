@@ -1,11 +1,18 @@
-import { monthName, wordOf, type LibraryPlant } from '@/lib/plants'
+import { monthName, type LibraryPlant } from '@/lib/plants'
 
 const MONTHS = Array.from({ length: 12 }, (_, i) => i + 1)
-/** Months in which leaves turn, at these latitudes. */
+/** Leaves are drawn turning in these months; the weeks differ by place and year. */
 const FALL_MONTHS = [10, 11]
 
-/** Tokens of flower, fruit and fall colours; others are drawn in ink. */
-const BLOOM_INKS = new Set(['white', 'pink', 'red', 'orange', 'yellow', 'green', 'blue', 'purple'])
+/** Inks for colours as they are named in the library; others are drawn in soft ink. */
+const FLOWER_AND_FRUIT: Record<string, string> = {
+  white: 'bloom-white', pink: 'bloom-pink', red: 'bloom-red', orange: 'bloom-orange', yellow: 'bloom-yellow', green: 'bloom-green',
+  blue: 'bloom-blue', purple: 'bloom-purple', multi: 'bloom-pink', black: 'ink', brown: 'bark',
+}
+const FALL: Record<string, string> = {
+  yellow: 'foliage-gold', orange: 'foliage-fall', red: 'foliage-red', purple: 'foliage-purple', bronze: 'foliage-bronze', multi: 'foliage-fall',
+}
+const OTHER = 'ink-soft'
 
 interface Band {
   title: string
@@ -15,10 +22,12 @@ interface Band {
 }
 
 function bandsOf({ bloomMonths, bloomColor, fruitMonths, fruitColor, fallColor }: LibraryPlant): Band[] {
-  const flower: Band = { title: 'Flower', what: bloomColor === 'multi' ? 'several colors' : wordOf(bloomColor || 'in flower').toLowerCase(), months: bloomMonths, ink: BLOOM_INKS.has(bloomColor) ? `bloom-${bloomColor}` : 'bloom-pink' }
-  const fruit: Band = { title: 'Fruit', what: fruitColor || 'fruit', months: fruitMonths, ink: 'ink-soft' }
-  const fall: Band = { title: 'Fall leaf', what: fallColor === 'multi' ? 'several colors' : fallColor, months: fallColor === 'none' ? [] : FALL_MONTHS, ink: 'risk' }
-  return [flower, fruit, fall]
+  const several = (color: string) => (color === 'multi' ? 'several colors' : color)
+  return [
+    { title: 'Flower', what: several(bloomColor) || 'in flower', months: bloomMonths, ink: FLOWER_AND_FRUIT[bloomColor] ?? OTHER },
+    { title: 'Fruit', what: fruitColor || 'in fruit', months: fruitMonths, ink: FLOWER_AND_FRUIT[fruitColor] ?? OTHER },
+    { title: 'Fall leaf', what: several(fallColor), months: fallColor === 'none' ? [] : FALL_MONTHS, ink: FALL[fallColor] ?? OTHER },
+  ]
 }
 
 /** The year in twelve cells: when it flowers, fruits and turns. Every filled cell says so in words too. */
@@ -51,6 +60,7 @@ export function MonthsStrip({ plant }: { plant: LibraryPlant }) {
           ))}
         </tbody>
       </table>
+      {plant.fallColor !== 'none' && <p className="mt-2 text-sm text-ink-soft">Fall color is drawn in October and November; the weeks differ by place and year.</p>}
     </div>
   )
 }

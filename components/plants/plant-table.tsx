@@ -24,6 +24,9 @@ function Flower({ plant }: { plant: LibraryPlant }) {
   return <>{bloomColor === '' ? '' : `${color}, `}{monthsInWords(bloomMonths)}</>
 }
 
+/** Short words of a narrow column. */
+const LIGHT_WORDS = { 'full-sun': 'sun', 'part-shade': 'part', 'full-shade': 'shade' } as const
+
 const columns = helper.columns([
   helper.accessor('botanical', { header: 'Botanical name', cell: ({ row }) => <Name plant={row.original} /> }),
   helper.accessor('common', { header: 'Common name' }),
@@ -31,12 +34,13 @@ const columns = helper.columns([
   helper.accessor('heightMax', { id: 'height', header: 'Height', cell: ({ row }) => rangeText(row.original.heightMin, row.original.heightMax) }),
   helper.accessor('spreadMax', { id: 'spread', header: 'Spread', cell: ({ row }) => rangeText(row.original.spreadMin, row.original.spreadMax) }),
   helper.accessor('zoneMin', { id: 'zone', header: 'Zones', cell: ({ row }) => zonesText(row.original) }),
-  helper.accessor('light', { header: 'Light', enableSorting: false, cell: ({ row }) => row.original.light.map((light) => wordOf(light).toLowerCase()).join(', ') }),
+  helper.accessor('light', { header: 'Light', enableSorting: false, cell: ({ row }) => row.original.light.map((light) => LIGHT_WORDS[light]).join(', ') || 'not recorded' }),
   helper.accessor('bloomMonths', { id: 'flower', header: 'Flower', enableSorting: false, cell: ({ row }) => <Flower plant={row.original} /> }),
-  helper.accessor('deer', { header: 'Deer', enableSorting: false, cell: ({ row }) => DEER_WORDS[row.original.deer] }),
+  helper.accessor('deer', { header: 'Deer browse', enableSorting: false, cell: ({ row }) => DEER_WORDS[row.original.deer].replace(' browsed', '') }),
 ])
 
 const FIGURES = new Set(['height', 'spread', 'zone'])
+const UNBROKEN = new Set(['height', 'spread', 'zone', 'light'])
 const ARIA_SORT = { asc: 'ascending', desc: 'descending' } as const
 
 /** The address that sorts by a column: again turns the order; the first page is shown. */
@@ -79,7 +83,7 @@ export function PlantTable({ plants, query, caption }: { plants: LibraryPlant[];
           {table.getRowModel().rows.map((row) => (
             <tr key={row.id} className="border-b border-rule last:border-0">
               {row.getAllCells().map((cell) => {
-                const className = `px-3 py-1 align-middle ${FIGURES.has(cell.column.id) ? 'font-mono text-sm whitespace-nowrap' : ''}`
+                const className = `px-3 py-1 align-middle ${FIGURES.has(cell.column.id) ? 'font-mono text-sm' : ''} ${UNBROKEN.has(cell.column.id) ? 'whitespace-nowrap' : ''}`
                 return cell.column.id === 'botanical'
                   ? <th key={cell.id} scope="row" className={`${className} min-w-56 font-normal`}><table.FlexRender cell={cell} /></th>
                   : <td key={cell.id} className={className}><table.FlexRender cell={cell} /></td>
