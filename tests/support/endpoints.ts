@@ -81,11 +81,17 @@ const drawing = (rest = '') => ({ projectId, facadeId }: Ids) => `/projects/${pr
 export const PAGES: PageEndpoint[] = [
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/page.tsx', path: drawing(), outcome: ofTheStudio() },
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/measure/page.tsx', path: drawing('/measure'), outcome: ofTheStudio() },
+  { file: 'app/(studio)/plants/page.tsx', path: () => '/plants', outcome: members() },
+  { file: 'app/(studio)/plants/new/page.tsx', path: () => '/plants/new', outcome: members({ reviewer: '/plants', estimator: '/plants' }) },
+  { file: 'app/(studio)/plants/import/page.tsx', path: () => '/plants/import', outcome: members({ reviewer: '/plants', estimator: '/plants' }) },
+  { file: 'app/(studio)/plants/[plantId]/page.tsx', path: ({ plantId }) => `/plants/${plantId}`, outcome: ofTheStudio() },
+  { file: 'app/(studio)/plants/[plantId]/edit/page.tsx', path: ({ plantId }) => `/plants/${plantId}/edit`, outcome: ofTheStudio({ reviewer: '/plants', estimator: '/plants' }) },
   { file: 'app/(public)/c/[token]/page.tsx', path: () => '/c/never-made', outcome: everyone('shown') },
   { file: 'app/(client)/view/page.tsx', path: () => '/view', outcome: members({ owner: '/projects', designer: '/projects', reviewer: '/projects', estimator: '/projects', stranger: '/projects', client: 'shown', otherClient: 'shown' }) },
 ]
 
 export const ACTIONS: ActionEndpoint[] = [
+  { file: 'app/(studio)/plants/actions.ts', actions: { createPlantAction: 'plant:edit', savePlantAction: 'plant:edit', removePlantAction: 'plant:edit' } },
   { file: 'app/(public)/c/[token]/open-garden.ts', actions: { openGarden: null } },
 ]
 

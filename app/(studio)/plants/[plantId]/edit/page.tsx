@@ -14,7 +14,8 @@ export default async function EditPlantPage({ params }: { params: Promise<{ plan
   const { plantId } = await params
   const context = await requireContext()
   const plant = readPlant(context, plantId)
-  if (plant.studioId === null || !can(context.actor.role, 'plant:edit')) redirect(`/plants/${plantId}` as Route)
+  if (!can(context.actor.role, 'plant:edit')) redirect('/plants' as Route)
+  if (plant.studioId === null) redirect(`/plants/${plantId}` as Route)
   return (
     <main className="px-4 py-6">
       <h1 className="font-heading text-3xl">Change <BotanicalName name={plant.botanical} /></h1>
