@@ -24,22 +24,25 @@ function crownFor(plant: LibraryPlant, bound: Bound): { crown: Crown; placement:
 /** A summer month in which it flowers, else July. */
 const monthShown = ({ bloomMonths }: LibraryPlant): number => bloomMonths.find((month) => month >= 5 && month <= 9) ?? 7
 
+const THIN = { stroke: 'var(--color-ink-soft)', strokeWidth: 1.2, vectorEffect: 'non-scaling-stroke' as const }
+const DASHED = { fill: 'none', stroke: 'var(--color-ink)', strokeWidth: 1.4, vectorEffect: 'non-scaling-stroke' as const }
+
 const outlineOf = (crown: Crown) => `M${silhouette(crown, 24).map(({ x, z }) => `${x.toFixed(1)} ${(-z).toFixed(1)}`).join('L')}Z`
 
 /** Somebody of 6 ft standing with their feet at 0 0, in an outline of 72 units. */
 const PERSON = 'M0-72c3.2 0 5 2.4 5 5.4S3.3-61 2.4-60v2.6c5 .7 8 2.5 8.6 6.6l1.6 16.4c.2 2-.4 3.4-1.6 3.6s-2-.7-2.3-2.4L6.6-46.5 6.4-34 5.6-2 7.5 0H1.4L.6-30h-1.2L-1.4 0h-6.1l1.9-2-.8-32-.2-12.5-2.1 13.3c-.3 1.7-1.1 2.6-2.3 2.4s-1.8-1.6-1.6-3.6L-11-50.8c.6-4.1 3.6-5.9 8.6-6.6V-60C-3.3-61-5-63.6-5-66.6S-3.2-72 0-72Z'
 
 function Person({ x }: { x: number }) {
-  return <path d={PERSON} transform={`translate(${x} 0)`} fill="var(--color-ink-soft)" />
+  return <path d={PERSON} transform={`translate(${x} 0)`} fill="var(--color-rule)" {...THIN} />
 }
 
-function Door({ x, line }: { x: number; line: object }) {
+function Door({ x }: { x: number }) {
   const { width, height } = DOOR
   return (
-    <g fill="var(--color-sheet)" {...line}>
-      <path d={`M${x} 0V${-height}H${x + width}V0`} />
-      <path d={`M${x + 6} ${-height + 8}h${width - 12}v26h${12 - width}ZM${x + 6} ${-height + 42}h${width - 12}v28h${12 - width}Z`} fill="none" />
-      <circle cx={x + width - 4} cy={-36} r={1.4} fill="var(--color-ink)" stroke="none" />
+    <g>
+      <path fill="var(--color-sheet)" {...THIN} d={`M${x} 0V${-height}H${x + width}V0`} />
+      <path fill="none" {...THIN} d={`M${x + 6} ${-height + 8}h${width - 12}v26h${12 - width}ZM${x + 6} ${-height + 42}h${width - 12}v28h${12 - width}Z`} />
+      <circle cx={x + width - 4} cy={-36} r={1.4} fill="var(--color-ink)" />
     </g>
   )
 }
@@ -84,22 +87,20 @@ export function SizeFigure({ plant }: { plant: LibraryPlant }) {
   const bare = half - left + GAP_IN
   const inch = bare / (FIGURE_PX - 60)
   const width = bare + 60 * inch
-  const line = { stroke: 'var(--color-ink-soft)', strokeWidth: 1.2, vectorEffect: 'non-scaling-stroke' as const }
-  const dashed = { fill: 'none', stroke: 'var(--color-ink)', strokeWidth: 1.4, vectorEffect: 'non-scaling-stroke' as const }
   const drawing = drawPlantElevation({ plant, placement, crown: expected, month: monthShown(plant) }, (z) => -z)
   const doorX = left + 2
   return (
     <figure className="m-0">
       <svg
-        viewBox={`${left - 60 * inch} ${-height} ${width} ${height + 8 * inch}`} width="100%" role="img" className="max-h-140"
+        viewBox={`${left - 60 * inch} ${-height - 14 * inch} ${width} ${height + 22 * inch}`} width="100%" role="img" className="max-h-140"
         aria-label={`The plant full grown beside a person of 6 feet and a door of 6 feet 8 inches. Expected: ${sizeText(expected)}.`}
       >
         <Ruler x={left} top={height} inch={inch} right={half + GAP_IN} />
-        <Door x={doorX} line={line} />
+        <Door x={doorX} />
         <Person x={doorX + DOOR.width + 15} />
         <PlantShapes drawing={drawing} pen={{ name: 'size', inch }} part="plant" />
-        <path d={outlineOf(low)} {...dashed} strokeDasharray="3 4" />
-        <path d={outlineOf(high)} {...dashed} strokeDasharray="10 5" />
+        <path d={outlineOf(low)} {...DASHED} strokeDasharray="3 4" />
+        <path d={outlineOf(high)} {...DASHED} strokeDasharray="10 5" />
         <path d={`M${left} 0H${half + GAP_IN}`} stroke="var(--color-ink)" strokeWidth={2} vectorEffect="non-scaling-stroke" />
       </svg>
       <figcaption>
