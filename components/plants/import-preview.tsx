@@ -14,16 +14,22 @@ const linesOf = (problems: readonly LineProblem[]) => new Set(problems.map(({ li
 export function previewSentence({ isReadable, total, good, problems }: Preview): string {
   if (!isReadable) return 'This file cannot be brought in as it is.'
   if (problems.length === 0) return `All ${plantCount(total)} can come in.`
-  return `${counted(good.length, 'plant', 'plants')} of ${total} can come in; ${counted(linesOf(problems), 'line has', 'lines have')} problems.`
+  return `${plantCount(good.length)} of ${total} can come in; ${counted(linesOf(problems), 'line has', 'lines have')} problems.`
+}
+
+/** What an import came to. */
+export function doneSentence({ added, problems }: { added: number; problems: readonly LineProblem[] }): string {
+  const left = linesOf(problems)
+  return `${plantCount(added)} brought in${left > 0 ? `, ${counted(left, 'line', 'lines')} left out` : ''}.`
 }
 
 const Rest = ({ count }: { count: number }) => (count > 0 ? <p className="mt-2 text-ink-soft">…and {count.toLocaleString('en-US')} more.</p> : null)
 
 /** Every bad cell by its line and column. */
-export function ProblemTable({ problems }: { problems: readonly LineProblem[] }) {
+export function ProblemTable({ title = 'Lines with problems', problems }: { title?: string; problems: readonly LineProblem[] }) {
   return (
-    <section className={CARD} aria-label="Lines with problems">
-      <h2 className={HEADING}>Lines with problems</h2>
+    <section className={CARD} aria-label={title}>
+      <h2 className={HEADING}>{title}</h2>
       <table className="mt-2 w-full border-collapse text-left align-top">
         <thead>
           <tr className="border-b border-ink-soft"><th scope="col" className="w-20 py-2">Line</th><th scope="col" className="w-40 py-2">Column</th><th scope="col" className="py-2">What is wrong</th></tr>

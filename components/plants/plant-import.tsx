@@ -3,8 +3,8 @@
 import type { Route } from 'next'
 import Link from 'next/link'
 import { useRef, useState } from 'react'
-import { askImport, askPreview, type ImportMode, type Preview } from './import-calls'
-import { GoodTable, plantCount, previewSentence, ProblemTable } from './import-preview'
+import { askImport, askPreview, type ImportMode, type LineProblem, type Preview } from './import-calls'
+import { doneSentence, GoodTable, plantCount, previewSentence, ProblemTable } from './import-preview'
 import { CARD, CONTROL, HEADING, Labelled, PLAIN, STRONG } from './parts'
 import { readCsvFile } from './read-csv-file'
 
@@ -14,10 +14,11 @@ interface State {
   busy: '' | 'check' | 'import'
   message: string
   preview: Preview | null
-  added: number | null
+  /** What came of the last import. */
+  done: { added: number; problems: LineProblem[] } | null
 }
 
-const EMPTY: State = { text: '', note: '', busy: '', message: '', preview: null, added: null }
+const EMPTY: State = { text: '', note: '', busy: '', message: '', preview: null, done: null }
 
 function useImport() {
   const [state, setState] = useState(EMPTY)
@@ -25,7 +26,7 @@ function useImport() {
   const change = (part: Partial<State>) => setState((before) => ({ ...before, ...part }))
   const setText = (text: string, note = '') => {
     running.current?.abort()
-    change({ text, note, message: '', preview: null, added: null, busy: '' })
+    change({ text, note, message: '', preview: null, done: null, busy: '' })
   }
   const begin = (busy: State['busy']): AbortSignal => {
     running.current = new AbortController()
@@ -39,7 +40,7 @@ function useImport() {
     takeFile: async (file: File | undefined) => {
       if (!file) return
       const read = await readCsvFile(file).catch(() => undefined)
-      if (read) setText(read.text, read.note)
+      if (read) setText(read.text, [`Read from ${file.name}.`, read.note].filter(Boolean).join(' '))
       else change({ message: read === null ? 'The file is larger than 1 MB. Split it and bring in the parts.' : 'The file could not be read. Choose it again.', preview: null })
     },
     check: async () => {
@@ -49,7 +50,7 @@ function useImport() {
     },
     bring: async (mode: ImportMode) => {
       const answer = await askImport(state.text, mode, begin('import'))
-      if (answer.ok) setState({ ...EMPTY, added: answer.value.added })
+      if (answer.ok) setState({ ...EMPTY, done: answer.value })
       else change({ busy: '', message: answer.message })
     },
   }
@@ -61,7 +62,7 @@ function Source({ work }: { work: ReturnType<typeof useImport> }) {
     <section className={CARD} aria-label="The file">
       <div className="grid gap-4">
         <Labelled id="import-file" label="Choose a file" hint="CSV, up to 1 MB and 2,000 plants">
-          <input id="import-file" type="file" accept=".csv,.txt,text/csv,text/plain" aria-describedby="import-file-hint" disabled={busy !== ''} className={`${CONTROL} py-2`} onChange={(event) => void takeFile(event.target.files?.[0])} />
+          <input id="import-file" type="file" accept=".csv,.txt,text/csv,text/plain" aria-describedby="import-file-hint" disabled={busy !== ''} className={`${CONTROL} py-2`} onChange={(event) => { void takeFile(event.target.files?.[0]); event.target.value = '' }} />
         </Labelled>
         <Labelled id="import-text" label="Or paste it" {...(note && { hint: note })}>
           <textarea id="import-text" rows={8} spellCheck={false} wrap="off" value={text} readOnly={busy !== ''} aria-describedby={note ? 'import-text-hint' : undefined} className={`${CONTROL} py-2 font-mono text-sm`} onChange={(event) => setText(event.target.value)} />
@@ -104,14 +105,15 @@ function Decision({ preview, busy, bring }: { preview: Preview; busy: boolean; b
 
 export function PlantImport() {
   const work = useImport()
-  const { state: { preview, busy, added }, bring } = work
+  const { state: { preview, busy, done }, bring } = work
   return (
     <div className="grid gap-4">
       <Source work={work} />
       <div role="status" className="font-bold">
-        {added !== null && <p>{plantCount(added)} brought in. <Link href={'/plants?owner=own' as Route} className="inline-flex min-h-11 items-center underline underline-offset-4">See your own plants</Link></p>}
+        {done && <p>{doneSentence(done)} <Link href={'/plants?owner=own' as Route} className="inline-flex min-h-11 items-center underline underline-offset-4">See your own plants</Link></p>}
         {preview && previewSentence(preview)}
       </div>
+      {done && done.problems.length > 0 && <ProblemTable title="Lines left out" problems={done.problems} />}
       {preview && preview.problems.length > 0 && <ProblemTable problems={preview.problems} />}
       {preview?.isReadable && preview.good.length > 0 && <GoodTable good={preview.good} notes={preview.notes} />}
       {preview?.isReadable && preview.good.length > 0 && <Decision preview={preview} busy={busy === 'import'} bring={(mode) => void bring(mode)} />}
