@@ -1,0 +1,6 @@
+export { Button, LinkButton, buttonClass, type ButtonVariant } from './button'
+export { Dialog } from './dialog'
+export { EmptyState } from './empty-state'
+export { CheckboxField, Field, SelectField, TextAreaField, TextField } from './field'
+export { Notice, type NoticeTone } from './notice'
+export { PageHeader, type Crumb } from './page-header'
