@@ -1,0 +1,29 @@
+import { judgedPlants } from '../by-plant'
+import type { Rule } from '../rule'
+import type { Finding } from '../types'
+import { finding } from '../verdict'
+
+export const hardiness: Rule = {
+  scope: 'sheet',
+  meta: {
+    id: 'hardiness',
+    title: 'Hardiness',
+    question: 'Will it live through the winters here?',
+    settings: [],
+    sources: [{ publisher: 'USDA Agricultural Research Service', title: 'Plant Hardiness Zone Map 2023', address: 'https://planthardiness.ars.usda.gov/', known: 'read' }],
+    notes: 'The number of the zone without its half: a plant of zones 4-8 fits 4a to 8b. The zone says nothing of heat, so above the range is a risk.',
+  },
+  judge: (prepared) => {
+    const zone = parseInt(prepared.sheet.site.zone, 10)
+    return judgedPlants(prepared).flatMap(({ plant, placements }): Finding[] => {
+      const isCold = plant.zoneMin !== null && zone < plant.zoneMin
+      const isWarm = plant.zoneMax !== null && zone > plant.zoneMax
+      if (!isCold && !isWarm) return []
+      return [finding({
+        rule: 'hardiness', kind: isCold ? 'conflict' : 'risk', placements, feature: plant.id,
+        limit: isCold ? plant.zoneMin : plant.zoneMax,
+        measured: { low: zone, expected: zone, high: zone },
+      })]
+    })
+  },
+}

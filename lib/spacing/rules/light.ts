@@ -1,0 +1,23 @@
+import { judgedPlants } from '../by-plant'
+import type { Rule } from '../rule'
+import { finding } from '../verdict'
+
+export const light: Rule = {
+  scope: 'sheet',
+  meta: {
+    id: 'light',
+    title: 'Light',
+    question: 'Does it get the light it needs?',
+    settings: [],
+    sources: [
+      { publisher: 'K-State Research and Extension, Johnson County', title: 'Sun and shade: full sun 6 h or more, part shade 4 to 6', address: 'https://www.johnson.k-state.edu/programs/lawn-garden/agent-articles-fact-sheets-and-more/agent-articles/environment/sun-shade-conditions.html', known: 'read' },
+    ],
+    notes: 'A plant whose light is not known is not judged.',
+  },
+  judge: (prepared) =>
+    judgedPlants(prepared).flatMap(({ plant, placements }) =>
+      plant.light.length === 0 || plant.light.includes(prepared.sheet.site.light)
+        ? []
+        : [finding({ rule: 'light', kind: 'risk', placements, feature: plant.id })],
+    ),
+}
