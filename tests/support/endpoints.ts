@@ -79,6 +79,9 @@ const ofTheStudio = (who: Partial<For<PageOutcome>> = {}) => members({ stranger:
 const drawing = (rest = '') => ({ projectId, facadeId }: Ids) => `/projects/${projectId}/facades/${facadeId}${rest}`
 
 export const PAGES: PageEndpoint[] = [
+  { file: 'app/page.tsx', path: () => '/', outcome: members({ owner: '/projects', designer: '/projects', reviewer: '/projects', estimator: '/projects', stranger: '/projects' }) },
+  { file: 'app/(public)/sign-in/page.tsx', path: () => '/sign-in', outcome: { owner: '/projects', designer: '/projects', reviewer: '/projects', estimator: '/projects', stranger: '/projects', client: 'shown', otherClient: 'shown', nobody: 'shown' } },
+  { file: 'app/(studio)/account/page.tsx', path: () => '/account', outcome: members() },
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/page.tsx', path: drawing(), outcome: ofTheStudio() },
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/measure/page.tsx', path: drawing('/measure'), outcome: ofTheStudio() },
   { file: 'app/(studio)/plants/page.tsx', path: () => '/plants', outcome: members() },
@@ -91,6 +94,8 @@ export const PAGES: PageEndpoint[] = [
 ]
 
 export const ACTIONS: ActionEndpoint[] = [
+  { file: 'app/(public)/sign-in/actions.ts', actions: { signInAction: null } },
+  { file: 'app/(studio)/account/actions.ts', actions: { changePasswordAction: 'own-password:change', signOutAction: null } },
   { file: 'app/(studio)/plants/actions.ts', actions: { createPlantAction: 'plant:edit', savePlantAction: 'plant:edit', removePlantAction: 'plant:edit' } },
   { file: 'app/(public)/c/[token]/open-garden.ts', actions: { openGarden: null } },
 ]
