@@ -2,8 +2,8 @@
 /** Controls of the plant form, tied to their field by name. */
 import { useId } from 'react'
 import { useFormContext, type FieldPath } from 'react-hook-form'
+import { SelectField, TextField } from '@/components/ui'
 import { monthName, wordOf, type PlantFormValues } from '@/lib/plants'
-import { CONTROL, describedBy, Labelled } from './parts'
 
 type Name = FieldPath<PlantFormValues>
 
@@ -17,21 +17,12 @@ interface TextProps {
   name: Name
   label: string
   hint?: string
-  mono?: boolean
 }
 
-export function FormText({ name, label, hint, mono = false }: TextProps) {
+export function FormText({ name, label, hint }: TextProps) {
   const { register } = useFormContext<PlantFormValues>()
   const error = useProblem(name)
-  const id = useId()
-  return (
-    <Labelled id={id} label={label} {...(hint && { hint })} error={error}>
-      <input
-        {...register(name)} id={id} type="text" autoComplete="off" className={mono ? `${CONTROL} font-mono` : CONTROL}
-        aria-invalid={error ? true : undefined} aria-describedby={describedBy({ id, ...(hint && { hint }), error })}
-      />
-    </Labelled>
-  )
+  return <TextField {...register(name)} label={label} hint={hint} error={error} autoComplete="off" />
 }
 
 interface SelectProps {
@@ -44,14 +35,8 @@ interface SelectProps {
 export function FormSelect({ name, label, values, words = {} }: SelectProps) {
   const { register } = useFormContext<PlantFormValues>()
   const error = useProblem(name)
-  const id = useId()
-  return (
-    <Labelled id={id} label={label} error={error}>
-      <select {...register(name)} id={id} className={CONTROL} aria-invalid={error ? true : undefined} aria-describedby={describedBy({ id, error })}>
-        {values.map((value) => <option key={value} value={value}>{words[value] ?? wordOf(value)}</option>)}
-      </select>
-    </Labelled>
-  )
+  const options = values.map((value) => ({ value, label: words[value] ?? wordOf(value) }))
+  return <SelectField {...register(name)} label={label} error={error} options={options} />
 }
 
 const BOX = 'flex min-h-11 items-center gap-2 rounded-sm border border-rule px-3 has-checked:border-leaf has-checked:bg-paper'
@@ -69,7 +54,7 @@ export function FormChoices({ name, legend, values, word = wordOf }: ChoicesProp
   const error = useProblem(name)
   const id = useId()
   return (
-    <fieldset aria-describedby={describedBy({ id, error })}>
+    <fieldset aria-describedby={error ? `${id}-error` : undefined}>
       <legend className="mb-1 font-bold">{legend}</legend>
       <div className="flex flex-wrap gap-2">
         {values.map((value) => (

@@ -2,12 +2,13 @@
 /** The plant form, part by part. */
 import type { ReactNode } from 'react'
 import { useFieldArray, useFormContext, useWatch } from 'react-hook-form'
+import { Button } from '@/components/ui'
 import {
   BIRD_VALUES, BLOOM_COLORS, CATEGORIES, DEER_CLASSES, DEER_WORDS, FACT_LABELS, FACTS, FALL_COLORS, FOLIAGE_COLORS, GROWTHS, HABITS,
   JUGLONES, LEAVES, LIGHTS, NATIVE_REGIONS, PRUNES, TEXTURES, TOXICITIES, WATERS, type Fact, type PlantFormValues,
 } from '@/lib/plants'
 import { FormChoices, FormMonths, FormSelect, FormText, FormYesNo } from './form-fields'
-import { CARD, HEADING, PLAIN } from './parts'
+import { CARD, HEADING } from './parts'
 
 function Section({ title, lead, children }: { title: string; lead?: string; children: ReactNode }) {
   return (
@@ -40,10 +41,10 @@ export function SizeSection() {
   return (
     <Section title="Size when full grown" lead="Every judgement about a bed rests on these. Give the range on record; where one figure is printed, give it twice.">
       <Row>
-        <FormText mono name="heightMin" label="Smallest height" hint="36, 3 ft or 3'-0&quot;" />
-        <FormText mono name="heightMax" label="Largest height" />
-        <FormText mono name="spreadMin" label="Smallest spread" />
-        <FormText mono name="spreadMax" label="Largest spread" />
+        <FormText name="heightMin" label="Smallest height" hint="36, 3 ft or 3'-0&quot;" />
+        <FormText name="heightMax" label="Largest height" />
+        <FormText name="spreadMin" label="Smallest spread" />
+        <FormText name="spreadMax" label="Largest spread" />
       </Row>
       <Row>
         <FormSelect name="habit" label="Habit" values={HABITS} />
@@ -59,8 +60,8 @@ export function PlaceSection() {
   return (
     <Section title="Where it grows">
       <Row>
-        <FormText mono name="zoneMin" label="Coldest zone" hint="1 to 13; empty if grown for one season" />
-        <FormText mono name="zoneMax" label="Warmest zone" />
+        <FormText name="zoneMin" label="Coldest zone" hint="1 to 13; empty if grown for one season" />
+        <FormText name="zoneMax" label="Warmest zone" />
         <FormSelect name="deer" label="Deer" values={DEER_CLASSES} words={DEER_WORDS} />
         <FormSelect name="juglone" label="Near walnut" values={JUGLONES} words={{ unknown: 'Not known' }} />
       </Row>
@@ -111,10 +112,10 @@ export function SourceSection() {
         <div key={field.id} role="group" aria-label={`Source ${i + 1}`} className="grid gap-3 border-t border-rule pt-3 md:grid-cols-[1fr_1fr_auto] md:items-start">
           <FormText name={`sources.${i}.title`} label="Title" hint="Who published it, and what" />
           <FormText name={`sources.${i}.url`} label="Address" hint="https://, or empty for print" />
-          <button type="button" className={`${PLAIN} md:mt-7`} onClick={() => remove(i)}>Remove source {i + 1}</button>
+          <Button className="md:mt-7" onClick={() => remove(i)}>Remove source {i + 1}</Button>
         </div>
       ))}
-      <div><button type="button" className={PLAIN} disabled={fields.length >= 12} onClick={() => append({ title: '', url: '' })}>Add a source</button></div>
+      <div><Button disabled={fields.length >= 12} onClick={() => append({ title: '', url: '' })}>Add a source</Button></div>
       {hasSources && <FormChoices name="memoryFacts" legend="Not read there, but from memory" values={FACTS} word={factWord} />}
     </Section>
   )

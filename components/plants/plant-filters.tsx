@@ -4,12 +4,12 @@ import Form from 'next/form'
 import type { Route } from 'next'
 import Link from 'next/link'
 import { useEffect, useRef } from 'react'
+import { Button, SelectField, TextField } from '@/components/ui'
 import {
   BLOOM_FILTERS, CATEGORIES, DEER_CLASSES, DEER_WORDS, FOLIAGE_COLORS, isNarrowed, LEAVES, LIGHTS, plantQueryText, wordOf,
   type PlantQuery, type QueryProblem,
 } from '@/lib/plants'
 import { formatLength } from '@/lib/measure'
-import { CONTROL, describedBy, Labelled, STRONG } from './parts'
 
 type Choices = readonly (readonly [value: string, word: string])[]
 
@@ -19,15 +19,8 @@ const DEER_CHOICES: Choices = DEER_CLASSES.map((deer) => [deer, deer === 'rarely
 const OWNER_CHOICES: Choices = [['shared', 'Shared library'], ['own', 'Our own']]
 
 function Choice({ name, label, value, choices }: { name: string; label: string; value: string; choices: Choices }) {
-  const id = `filter-${name}`
-  return (
-    <Labelled id={id} label={label}>
-      <select id={id} name={name} defaultValue={value} data-asked={value} className={CONTROL}>
-        <option value="">Any</option>
-        {choices.map(([choice, word]) => <option key={choice} value={choice}>{word}</option>)}
-      </select>
-    </Labelled>
-  )
+  const options = [{ value: '', label: 'Any' }, ...choices.map(([choice, word]) => ({ value: choice, label: word }))]
+  return <SelectField name={name} label={label} defaultValue={value} data-asked={value} options={options} />
 }
 
 interface EntryProps {
@@ -40,15 +33,7 @@ interface EntryProps {
 }
 
 function Entry({ name, label, value, hint, problem, type = 'text' }: EntryProps) {
-  const id = `filter-${name}`
-  return (
-    <Labelled id={id} label={label} {...(hint && { hint })} error={problem}>
-      <input
-        id={id} name={name} type={type} defaultValue={value} data-asked={value} autoComplete="off" className={CONTROL}
-        aria-invalid={problem ? true : undefined} aria-describedby={describedBy({ id, ...(hint && { hint }), error: problem })}
-      />
-    </Labelled>
-  )
+  return <TextField name={name} type={type} label={label} hint={hint} error={problem} defaultValue={value} data-asked={value} autoComplete="off" />
 }
 
 /** Going back or clearing shows another query: the controls follow the address, keeping the focus where it is. */
@@ -94,7 +79,7 @@ export function PlantFilters({ query, problems, typed }: Props) {
       {query.sort !== 'match' && <input type="hidden" name="sort" value={query.sort} />}
       {query.direction !== 'asc' && <input type="hidden" name="direction" value={query.direction} />}
       <div className="mt-3 flex flex-wrap items-center gap-3">
-        <button type="submit" className={STRONG}>Show plants</button>
+        <Button type="submit" variant="primary">Show plants</Button>
         {(isNarrowed(query) || problems.length > 0) && (
           <Link href={'/plants' as Route} className="inline-flex min-h-11 items-center px-2 underline underline-offset-4">Clear all filters</Link>
         )}

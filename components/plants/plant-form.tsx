@@ -2,14 +2,13 @@
 /** Adds or changes a plant of the studio. Nothing typed is lost when something does not fit or the server is away. */
 import { zodResolver } from '@hookform/resolvers/zod'
 import type { Route } from 'next'
-import Link from 'next/link'
 import { useRouter } from 'next/navigation'
 import { useEffect, useState } from 'react'
 import { FormProvider, useForm, type FieldPath, type SubmitErrorHandler, type UseFormReturn } from 'react-hook-form'
+import { Button, LinkButton } from '@/components/ui'
 import type { ErrorBody } from '@/lib/errors'
 import { EMPTY_FORM, formValuesOf, plantFormSchema, type PlantFormValues, type PlantInput } from '@/lib/plants'
 import { CautionSection, NameSection, PlaceSection, SizeSection, SourceSection, YearSection } from './form-sections'
-import { PLAIN, STRONG } from './parts'
 
 export type SaveAnswer = { ok: true; value: { id: string } } | { ok: false; error: ErrorBody['error'] }
 
@@ -87,8 +86,8 @@ export function PlantForm(props: Props) {
         <CautionSection />
         <SourceSection />
         <div className="sticky bottom-0 z-10 -mx-4 flex flex-wrap items-center gap-3 border-t border-rule bg-paper px-4 py-3">
-          <button type="submit" className={STRONG} disabled={isSubmitting}>{isSubmitting ? 'Saving…' : plant ? 'Save changes' : 'Add plant'}</button>
-          <Link href={back as Route} className={PLAIN}>Leave without saving</Link>
+          <Button type="submit" variant="primary" disabled={isSubmitting}>{isSubmitting ? 'Saving…' : plant ? 'Save changes' : 'Add plant'}</Button>
+          <LinkButton href={back}>Leave without saving</LinkButton>
           <p role="alert" className="min-w-0 flex-1 text-conflict">{message}</p>
         </div>
       </form>

@@ -3,9 +3,10 @@
 import type { Route } from 'next'
 import Link from 'next/link'
 import { useRef, useState } from 'react'
+import { Button, TextAreaField, TextField } from '@/components/ui'
 import { askImport, askPreview, type ImportMode, type LineProblem, type Preview } from './import-calls'
 import { doneSentence, GoodTable, plantCount, previewSentence, ProblemTable } from './import-preview'
-import { CARD, CONTROL, HEADING, Labelled, PLAIN, STRONG } from './parts'
+import { CARD, HEADING } from './parts'
 import { readCsvFile } from './read-csv-file'
 
 interface State {
@@ -61,16 +62,12 @@ function Source({ work }: { work: ReturnType<typeof useImport> }) {
   return (
     <section className={CARD} aria-label="The file">
       <div className="grid gap-4">
-        <Labelled id="import-file" label="Choose a file" hint="CSV, up to 1 MB and 2,000 plants">
-          <input id="import-file" type="file" accept=".csv,.txt,text/csv,text/plain" aria-describedby="import-file-hint" disabled={busy !== ''} className={`${CONTROL} py-2`} onChange={(event) => { void takeFile(event.target.files?.[0]); event.target.value = '' }} />
-        </Labelled>
-        <Labelled id="import-text" label="Or paste it" {...(note && { hint: note })}>
-          <textarea id="import-text" rows={8} spellCheck={false} wrap="off" value={text} readOnly={busy !== ''} aria-describedby={note ? 'import-text-hint' : undefined} className={`${CONTROL} py-2 font-mono text-sm`} onChange={(event) => setText(event.target.value)} />
-        </Labelled>
+        <TextField id="import-file" type="file" label="Choose a file" hint="CSV, up to 1 MB and 2,000 plants" accept=".csv,.txt,text/csv,text/plain" disabled={busy !== ''} onChange={(event) => { void takeFile(event.target.files?.[0]); event.target.value = '' }} />
+        <TextAreaField id="import-text" label="Or paste it" hint={note || undefined} rows={8} spellCheck={false} wrap="off" value={text} readOnly={busy !== ''} onChange={(event) => setText(event.target.value)} />
       </div>
       <div className="mt-3 flex flex-wrap items-center gap-3">
-        <button type="button" className={PLAIN} disabled={busy !== '' || text.trim() === ''} onClick={() => void check()}>{busy === 'check' ? 'Looking it over…' : 'Look it over'}</button>
-        {busy === 'check' && <button type="button" className={PLAIN} onClick={stop}>Stop</button>}
+        <Button disabled={busy !== '' || text.trim() === ''} onClick={() => void check()}>{busy === 'check' ? 'Looking it over…' : 'Look it over'}</Button>
+        {busy === 'check' && <Button onClick={stop}>Stop</Button>}
         <a href="/api/plants/import/template" download className="inline-flex min-h-11 items-center px-2 underline underline-offset-4">Template with an example</a>
       </div>
       <p role="alert" className="mt-2 text-conflict">{message}</p>
@@ -98,7 +95,7 @@ function Decision({ preview, busy, bring }: { preview: Preview; busy: boolean; b
       )}
       {refuses
         ? <p>Nothing will be brought in. Mend the lines above in the file, then look it over again.</p>
-        : <button type="button" className={STRONG} disabled={busy || good.length === 0} onClick={() => bring(mode)}>{busy ? 'Bringing in…' : `Bring in ${plantCount(good.length)}`}</button>}
+        : <Button variant="primary" disabled={busy || good.length === 0} onClick={() => bring(mode)}>{busy ? 'Bringing in…' : `Bring in ${plantCount(good.length)}`}</Button>}
     </section>
   )
 }

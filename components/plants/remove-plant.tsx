@@ -2,8 +2,8 @@
 import type { Route } from 'next'
 import { useRouter } from 'next/navigation'
 import { useState, useTransition } from 'react'
+import { Button } from '@/components/ui'
 import type { ErrorBody } from '@/lib/errors'
-import { PLAIN, STRONG } from './parts'
 
 interface Props {
   remove: () => Promise<{ ok: true } | { ok: false; error: ErrorBody['error'] }>
@@ -30,11 +30,11 @@ export function RemovePlant({ remove }: Props) {
       {isAsking ? (
         <>
           <span>Take this plant out of your library for good?</span>
-          <button type="button" className={STRONG} disabled={isBusy} onClick={confirm}>{isBusy ? 'Removing…' : 'Remove it'}</button>
-          <button type="button" className={PLAIN} autoFocus onClick={() => setAsking(false)}>Keep it</button>
+          <Button variant="danger" disabled={isBusy} onClick={confirm}>{isBusy ? 'Removing…' : 'Remove it'}</Button>
+          <Button autoFocus onClick={() => setAsking(false)}>Keep it</Button>
         </>
       ) : (
-        <button type="button" className={PLAIN} onClick={() => { setMessage(null); setAsking(true) }}>Remove plant</button>
+        <Button onClick={() => { setMessage(null); setAsking(true) }}>Remove plant</Button>
       )}
       <p role="alert" className="text-conflict">{message}</p>
     </div>

@@ -61,6 +61,15 @@ function Ruler({ x, top, inch, right }: { x: number; top: number; inch: number; 
 
 const sizeText = ({ height, spread }: Crown) => `${formatLength(Math.round(height))} high, ${formatLength(Math.round(spread))} wide`
 
+const isSingle = (plant: LibraryPlant) => plant.heightMin === plant.heightMax || plant.spreadMin === plant.spreadMax
+
+/** How the three sizes come from the figures on record: the same way as in the check. */
+function basisOf(plant: LibraryPlant): string {
+  const single = isSingle(plant) ? ' Where one figure is on record, low is 15 % under it and high 15 % over it.' : ''
+  if (plant.category === 'tree') return `Low and expected are the smallest and the middle of the figures on record; high is a fifth over the largest, since measured street trees outgrow such lists.${single.replace(' and high 15 % over it', '')}`
+  return `The smallest, middle and largest of the figures on record.${single}`
+}
+
 /** What is said under the figure, and read aloud in its place. */
 function Legend({ low, expected, high }: Record<Bound, Crown>) {
   const lines = [['Low', 'short dashes', low], ['Expected', 'drawn', expected], ['High', 'long dashes', high]] as const
@@ -105,7 +114,7 @@ export function SizeFigure({ plant }: { plant: LibraryPlant }) {
       </svg>
       <figcaption>
         <Legend low={low} expected={expected} high={high} />
-        <p className="mt-2 text-sm text-ink-soft">{`Sizes are those on record for the full-grown plant; beside it a person of ${formatLength(PERSON_IN)} and a door of ${formatLength(DOOR.height)}, all to one scale.`}</p>
+        <p className="mt-2 text-sm text-ink-soft">{`${basisOf(plant)} Beside it a person of ${formatLength(PERSON_IN)} and a door of ${formatLength(DOOR.height)}, all to one scale.`}</p>
       </figcaption>
     </figure>
   )

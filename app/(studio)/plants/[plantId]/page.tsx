@@ -1,12 +1,12 @@
-import type { Metadata, Route } from 'next'
-import Link from 'next/link'
+import type { Metadata } from 'next'
 import { BotanicalName } from '@/components/plants/botanical-name'
 import { Cautions } from '@/components/plants/cautions'
 import { FactList, SourceList } from '@/components/plants/fact-list'
 import { MonthsStrip } from '@/components/plants/months-strip'
-import { CARD, HEADING, PLAIN } from '@/components/plants/parts'
+import { CARD, HEADING } from '@/components/plants/parts'
 import { RemovePlant } from '@/components/plants/remove-plant'
 import { SizeFigure } from '@/components/plants/size-figure'
+import { LinkButton, PageHeader } from '@/components/ui'
 import { can } from '@/lib/access'
 import { requireContext } from '@/lib/server/people/require-context'
 import { removePlantAction } from '../actions'
@@ -28,22 +28,12 @@ export default async function PlantPage({ params }: Props) {
   const canEdit = plant.studioId !== null && can(context.actor.role, 'plant:edit')
   return (
     <main className="grid gap-4 px-4 py-6">
-      <div>
-        <Link href={'/plants' as Route} className="inline-flex min-h-11 items-center underline underline-offset-4">Plants</Link>
-        <div className="flex flex-wrap items-start justify-between gap-3">
-          <div>
-            <h1 className="font-heading text-4xl"><BotanicalName name={plant.botanical} /></h1>
-            <p className="text-xl">{plant.common}</p>
-            <p className="text-ink-soft">{plant.studioId === null ? 'Shared library' : 'Your studio’s own'}</p>
-          </div>
-          {canEdit && (
-            <div className="flex flex-wrap items-center gap-3">
-              <Link href={`/plants/${plantId}/edit` as Route} className={PLAIN}>Change plant</Link>
-              <RemovePlant remove={removePlantAction.bind(null, plantId)} />
-            </div>
-          )}
-        </div>
-      </div>
+      <PageHeader
+        title={<BotanicalName name={plant.botanical} />} crumbs={[{ href: '/plants', label: 'Plants' }]}
+        actions={canEdit && <><LinkButton href={`/plants/${plantId}/edit`}>Change plant</LinkButton><RemovePlant remove={removePlantAction.bind(null, plantId)} /></>}
+      >
+        {[plant.common, plant.studioId === null ? 'shared library' : 'your studio’s own'].filter(Boolean).join(' · ')}
+      </PageHeader>
       <div className="grid gap-4 lg:grid-cols-[3fr_2fr]">
         <section className={CARD} aria-label="Full-grown size">
           <h2 className={HEADING}>Full grown</h2>

@@ -2,6 +2,7 @@ import type { Metadata, Route } from 'next'
 import { redirect } from 'next/navigation'
 import { BotanicalName } from '@/components/plants/botanical-name'
 import { PlantForm } from '@/components/plants/plant-form'
+import { PageHeader } from '@/components/ui'
 import { can } from '@/lib/access'
 import { requireContext } from '@/lib/server/people/require-context'
 import { enteredPlantOf } from '@/lib/server/plants/save-plant'
@@ -17,9 +18,10 @@ export default async function EditPlantPage({ params }: { params: Promise<{ plan
   if (!can(context.actor.role, 'plant:edit')) redirect('/plants' as Route)
   if (plant.studioId === null) redirect(`/plants/${plantId}` as Route)
   return (
-    <main className="px-4 py-6">
-      <h1 className="font-heading text-3xl">Change <BotanicalName name={plant.botanical} /></h1>
-      <p className="mb-4 max-w-prose text-ink-soft">Drawings on which it stands are checked again with the new figures.</p>
+    <main className="grid gap-4 px-4 py-6">
+      <PageHeader title={<>Change <BotanicalName name={plant.botanical} /></>} crumbs={[{ href: '/plants', label: 'Plants' }, { href: `/plants/${plantId}`, label: plant.botanical }]}>
+        Drawings on which it stands are checked again with the new figures.
+      </PageHeader>
       <PlantForm plant={enteredPlantOf(plant)} save={savePlantAction.bind(null, plantId)} back={`/plants/${plantId}`} />
     </main>
   )
