@@ -23,7 +23,7 @@ function evidenceOf({ facts }: FactLine, sources: readonly PlantSource[], read: 
 export function FactList({ plant }: { plant: LibraryPlant }) {
   const read = plant.sources.filter(isRead)
   return (
-    <div className="grid gap-4 lg:grid-cols-2">
+    <div className="grid grid-cols-1 gap-4 lg:grid-cols-2">
       {factGroups(plant).map(({ title, lines }) => (
         <section key={title} className={CARD} aria-label={title}>
           <h2 className={HEADING}>{title}</h2>

@@ -78,7 +78,7 @@ export function PlantForm(props: Props) {
   useUnloadQuestion(isDirty && !saved)
   return (
     <FormProvider {...form}>
-      <form noValidate onSubmit={submit} className="grid gap-4">
+      <form noValidate onSubmit={submit} className="grid grid-cols-1 gap-4">
         <NameSection />
         <SizeSection />
         <PlaceSection />

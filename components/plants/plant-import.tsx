@@ -61,7 +61,7 @@ function Source({ work }: { work: ReturnType<typeof useImport> }) {
   const { state: { text, note, busy, message }, setText, takeFile, check, stop } = work
   return (
     <section className={CARD} aria-label="The file">
-      <div className="grid gap-4">
+      <div className="grid grid-cols-1 gap-4">
         <TextField id="import-file" type="file" label="Choose a file" hint="CSV, up to 1 MB and 2,000 plants" accept=".csv,.txt,text/csv,text/plain" disabled={busy !== ''} onChange={(event) => { void takeFile(event.target.files?.[0]); event.target.value = '' }} />
         <TextAreaField id="import-text" label="Or paste it" hint={note || undefined} rows={8} spellCheck={false} wrap="off" value={text} readOnly={busy !== ''} onChange={(event) => setText(event.target.value)} />
       </div>
@@ -104,7 +104,7 @@ export function PlantImport() {
   const work = useImport()
   const { state: { preview, busy, done }, bring } = work
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-1 gap-4">
       <Source work={work} />
       <div role="status" className="font-bold">
         {done && <p>{doneSentence(done)} <Link href={'/plants?owner=own' as Route} className="inline-flex min-h-11 items-center underline underline-offset-4">See your own plants</Link></p>}

@@ -27,19 +27,19 @@ export default async function PlantPage({ params }: Props) {
   const plant = readPlant(context, plantId)
   const canEdit = plant.studioId !== null && can(context.actor.role, 'plant:edit')
   return (
-    <main className="grid gap-4 px-4 py-6">
+    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-4 px-4 py-6">
       <PageHeader
         title={<BotanicalName name={plant.botanical} />} crumbs={[{ href: '/plants', label: 'Plants' }]}
         actions={canEdit && <><LinkButton href={`/plants/${plantId}/edit`}>Change plant</LinkButton><RemovePlant remove={removePlantAction.bind(null, plantId)} /></>}
       >
         {[plant.common, plant.studioId === null ? 'shared library' : 'your studio’s own'].filter(Boolean).join(' · ')}
       </PageHeader>
-      <div className="grid gap-4 lg:grid-cols-[3fr_2fr]">
+      <div className="grid grid-cols-1 gap-4 lg:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
         <section className={CARD} aria-label="Full-grown size">
           <h2 className={HEADING}>Full grown</h2>
           <SizeFigure plant={plant} />
         </section>
-        <div className="grid content-start gap-4">
+        <div className="grid grid-cols-1 content-start gap-4">
           <Cautions plant={plant} />
           <section className={CARD} aria-label="Through the months">
             <h2 className={`${HEADING} mb-2`}>Through the months</h2>

@@ -11,7 +11,7 @@ export default async function ImportPlantsPage() {
   const { actor } = await requireContext()
   if (!can(actor.role, 'plant:edit')) redirect('/plants' as Route)
   return (
-    <main className="grid gap-4 px-4 py-6">
+    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-4 px-4 py-6">
       <PageHeader title="Import plants" crumbs={[{ href: '/plants', label: 'Plants' }]}>
         One plant a line, headed as in the template. Sizes are in inches, or say their unit; lists have | between; months read 6-9, or 11-2 over the turn of the year.
       </PageHeader>

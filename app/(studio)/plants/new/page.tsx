@@ -12,7 +12,7 @@ export default async function NewPlantPage() {
   const { actor } = await requireContext()
   if (!can(actor.role, 'plant:edit')) redirect('/plants' as Route)
   return (
-    <main className="grid gap-4 px-4 py-6">
+    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-4 px-4 py-6">
       <PageHeader title="Add a plant" crumbs={[{ href: '/plants', label: 'Plants' }]}>It stands in your studio’s library beside the shared plants. Nobody outside the studio sees it.</PageHeader>
       <PlantForm save={createPlantAction} back="/plants" />
     </main>

@@ -18,7 +18,7 @@ export default async function EditPlantPage({ params }: { params: Promise<{ plan
   if (!can(context.actor.role, 'plant:edit')) redirect('/plants' as Route)
   if (plant.studioId === null) redirect(`/plants/${plantId}` as Route)
   return (
-    <main className="grid gap-4 px-4 py-6">
+    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-4 px-4 py-6">
       <PageHeader title={<>Change <BotanicalName name={plant.botanical} /></>} crumbs={[{ href: '/plants', label: 'Plants' }, { href: `/plants/${plantId}`, label: plant.botanical }]}>
         Drawings on which it stands are checked again with the new figures.
       </PageHeader>
