@@ -46,8 +46,15 @@ function openingProblems({ facade, openings }: Sheet): Problem[] {
   })
 }
 
+/** Do all points lie on one line? Every triangle of the first point and a side is then empty. */
+function isFlat(outline: readonly Point[]): boolean {
+  const first = outline[0]!
+  return outline.slice(1, -1).every((point, i) => Math.abs(polygonArea([first, point, outline[i + 2]!])) < EPSILON)
+}
+
 /** What is wrong with one outline, as a sentence; null when it is a fair polygon. */
 export function outlineProblem(outline: readonly Point[]): string | null {
+  if (isFlat(outline)) return 'The outline encloses no ground.'
   if (polygonCrossesItself(outline)) return 'The outline crosses itself.'
   return Math.abs(polygonArea(outline)) < 1 ? 'The outline encloses no ground.' : null
 }

@@ -1,12 +1,14 @@
 /** The check: every rule over a sheet, or over one placement as it is moved. */
-import { growPlacement, growSheet, type Grown, type Prepared } from './prepared'
+import type { Plant } from '../plants/types'
+import { compareFindings } from './finding'
+import { growPlacement, growSheet, stretchOf, type Grown, type Prepared } from './prepared'
 import type { Rule } from './rule'
 import { RULES } from './rules'
 import { resolveStandards } from './standards'
-import { FINDING_KINDS, type Finding, type Placement, type Report, type Sheet } from './types'
+import type { Finding, FindingKind, Placement, Report, Sheet } from './types'
 
 /** Raised whenever an answer can change: findings are kept with the version that made them. */
-export const ENGINE_VERSION = '1.0.0'
+export const ENGINE_VERSION = '1.1.0'
 
 /** Makes a sheet ready to be judged, once; `checkPlacement` then asks it as often as a hand moves. */
 export const prepare = (sheet: Sheet): Prepared => growSheet(sheet, resolveStandards(sheet))
@@ -16,54 +18,51 @@ const PLACEMENT_RULES = only('placement')
 const PAIR_RULES = only('pair')
 const SHEET_RULES = only('sheet')
 
-const compareText = (a: string, b: string) => (a < b ? -1 : a > b ? 1 : 0)
-const rounded = (excess: number) => Math.round(excess * 64) / 64
-
-function compareFindings(a: Finding, b: Finding): number {
-  const first =
-    FINDING_KINDS.indexOf(a.kind) - FINDING_KINDS.indexOf(b.kind) || rounded(b.excess) - rounded(a.excess) || compareText(a.rule, b.rule)
-  if (first !== 0) return first
-  for (let i = 0; i < Math.max(a.placements.length, b.placements.length); i++) {
-    const order = compareText(a.placements[i] ?? '', b.placements[i] ?? '')
-    if (order !== 0) return order
-  }
-  return a.feature === null || b.feature === null ? Number(a.feature !== null) - Number(b.feature !== null) : compareText(a.feature, b.feature)
+/** What a studio has set a rule of one fixed kind to; undefined leaves the rule's own. */
+function kindSet({ standards }: Prepared, { meta }: Rule): string | undefined {
+  const set = meta.fixedKind && standards[`${meta.id}.kind`]
+  return typeof set === 'string' ? set : undefined
 }
 
-/** Could two plants have to do with each other? Only when they overlap along the wall at their widest. */
-const mayMeet = (a: Grown, b: Grown) => Math.abs(a.placement.x - b.placement.x) < a.widest + b.widest
-
-function judgePair(prepared: Prepared, a: Grown, b: Grown): Finding[] {
-  return PAIR_RULES.flatMap((rule) => rule.judge(prepared, a, b) ?? [])
-}
-
-/** Pairs along the wall, by sweeping from left to right over where each plant begins. */
-function judgePairs(prepared: Prepared): Finding[] {
-  const sorted = [...prepared.grown].sort((a, b) => a.placement.x - a.widest - (b.placement.x - b.widest))
+/** Asks rules and calls their findings what the studio has set. */
+function ask<R extends Rule>(prepared: Prepared, rules: readonly R[], judge: (rule: R) => readonly Finding[]): Finding[] {
   const found: Finding[] = []
-  sorted.forEach((a, i) => {
-    const right = a.placement.x + a.widest
-    for (let j = i + 1; j < sorted.length; j++) {
-      const b = sorted[j]!
-      if (b.placement.x - b.widest >= right) break
-      found.push(...judgePair(prepared, a, b))
-    }
-  })
+  for (const rule of rules) {
+    const kind = kindSet(prepared, rule)
+    if (kind === 'off') continue
+    for (const finding of judge(rule)) found.push(kind === undefined ? finding : { ...finding, kind: kind as FindingKind })
+  }
   return found
 }
 
+const judgeOne = (prepared: Prepared, one: Grown) => ask(prepared, PLACEMENT_RULES, (rule) => rule.judge(prepared, one))
+const judgePair = (prepared: Prepared, a: Grown, b: Grown) =>
+  ask(prepared, PAIR_RULES, (rule) => {
+    const found = rule.judge(prepared, a, b)
+    return found ? [found] : []
+  })
+
+/** Those that could ever touch a placement along the wall, itself left out. */
+function neighboursOf({ neighbours }: Prepared, one: Grown): Grown[] {
+  const { from, to } = stretchOf(one)
+  return neighbours.near(from, to).filter(({ placement }) => placement.id !== one.placement.id)
+}
+
 /**
- * Judges a whole sheet by every rule. Findings come in one order: kind, excess, rule, placements, feature.
- * Trusts its input: parse sheets from outside with `parseSheet` first.
+ * Judges a whole sheet by every rule. Findings come in one order: kind, excess, rule, placements, feature; they never
+ * depend on `library`, from which swaps are drawn. Trusts its input: parse sheets from outside with `parseSheet` first.
+ * Windows, cover, pockets, upkeep and remedies are not worked out by this version: they are empty.
  */
-export function check(sheet: Sheet): Report {
+export function check(sheet: Sheet, _options: { library?: readonly Plant[] } = {}): Report {
   const prepared = prepare(sheet)
-  const findings = [
-    ...prepared.grown.flatMap((one) => PLACEMENT_RULES.flatMap((rule) => rule.judge(prepared, one))),
-    ...judgePairs(prepared),
-    ...SHEET_RULES.flatMap((rule) => rule.judge(prepared)),
-  ].sort(compareFindings)
-  return { engine: ENGINE_VERSION, findings, windows: [], cover: [], pockets: [], upkeep: [] }
+  const findings = ask(prepared, SHEET_RULES, (rule) => rule.judge(prepared))
+  for (const one of prepared.grown) {
+    findings.push(...judgeOne(prepared, one))
+    for (const other of neighboursOf(prepared, one)) {
+      if (one.placement.id < other.placement.id) findings.push(...judgePair(prepared, one, other))
+    }
+  }
+  return { engine: ENGINE_VERSION, findings: findings.sort(compareFindings), windows: [], cover: [], pockets: [], upkeep: [] }
 }
 
 /**
@@ -74,10 +73,11 @@ export function check(sheet: Sheet): Report {
 export function checkPlacement(prepared: Prepared, placement: Placement): Finding[] {
   const plant = prepared.plants.get(placement.plant)
   if (!plant || placement.status === 'goes') return []
-  const one = growPlacement(prepared.sheet, plant, placement)
-  const neighbours = prepared.grown.filter((other) => other.placement.id !== placement.id && mayMeet(one, other))
-  return [
-    ...PLACEMENT_RULES.flatMap((rule) => rule.judge(prepared, one)),
-    ...neighbours.flatMap((other) => judgePair(prepared, one, other)),
-  ].sort(compareFindings)
+  const one = growPlacement(prepared, plant, placement)
+  const findings = judgeOne(prepared, one)
+  for (const other of neighboursOf(prepared, one)) {
+    const [a, b] = one.placement.id < other.placement.id ? [one, other] : [other, one]
+    findings.push(...judgePair(prepared, a, b))
+  }
+  return findings.sort(compareFindings)
 }

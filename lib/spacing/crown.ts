@@ -3,31 +3,9 @@
  * Heights are on the z axis, radii from the axis; inches.
  */
 import type { Habit } from '../plants/types'
-import { CONTACT } from './geometry/wall'
-import type { Inches } from './types'
-
-interface Profile {
-  base: number
-  shoulder: number
-  m: number
-  n: number
-}
-
-/** Half-width by height, as shares: straight from `base` up to the shoulder, then a superellipse to the tip. */
-const PROFILES: Record<Habit, Profile> = {
-  columnar: { base: 0.9, shoulder: 0.8, m: 2, n: 2 },
-  upright: { base: 0.6, shoulder: 0.5, m: 2, n: 2 },
-  pyramidal: { base: 1, shoulder: 0, m: 1, n: 1 },
-  rounded: { base: 0.7, shoulder: 0.45, m: 2, n: 2 },
-  mounded: { base: 1, shoulder: 0, m: 2, n: 2 },
-  spreading: { base: 0.8, shoulder: 0.4, m: 3, n: 2 },
-  vase: { base: 0.3, shoulder: 0.75, m: 2, n: 2 },
-  arching: { base: 0.5, shoulder: 0.6, m: 2, n: 2 },
-  weeping: { base: 0.9, shoulder: 0.5, m: 2, n: 2 },
-  clump: { base: 0.4, shoulder: 0.65, m: 2, n: 2 },
-  'multi-stem': { base: 0.6, shoulder: 0.5, m: 2, n: 2 },
-  prostrate: { base: 1, shoulder: 0, m: 4, n: 2 },
-}
+import { CONTACT } from './geometry/contact'
+import { inverseOf, PROFILES, shareAt, squareTo, whereItFalls, widthTo } from './profile'
+import type { Inches, Size } from './types'
 
 export interface Crown {
   x: Inches
@@ -41,109 +19,161 @@ export interface Crown {
   /** No foliage below this height above the soil. */
   clearStem: Inches
   habit: Habit
-  /** The uncut body whose shape this is; absent where nothing is cut. */
-  natural?: { height: Inches; spread: Inches }
+  /** The uncut size whose shape this is; absent where nothing is cut away. */
+  natural?: Size
 }
 
-/** The crown of a natural size, cut to a kept size as shears do where one is given. */
-export function makeCrown(
-  axis: { x: Inches; y: Inches; z0: Inches; habit: Habit },
-  natural: { height: Inches; spread: Inches; clearStem: Inches },
-  kept: { height?: Inches; spread?: Inches } = {},
-): Crown {
-  const height = Math.min(natural.height, kept.height ?? Infinity)
-  const clearStem = height < natural.height ? Math.min(natural.clearStem, 0.6 * height) : natural.clearStem
-  if (height === natural.height && kept.spread === undefined) return { ...axis, ...natural }
-  const uncut: Crown = { ...axis, height, spread: natural.spread, clearStem, natural: { height: natural.height, spread: natural.spread } }
-  const widest = 2 * reach(uncut, -Infinity, Infinity)
-  return { ...uncut, spread: Math.min(widest, kept.spread ?? Infinity) }
+export interface Axis {
+  x: Inches
+  y: Inches
+  z0: Inches
+  habit: Habit
 }
 
-const bottomOf = (crown: Crown) => crown.z0 + crown.clearStem
+/** What shears leave of a size: the largest share of its height that stays foliage-free. */
+export const MOST_CLEAR = 0.6
+
+/**
+ * The crown of a natural size, cut to a kept size as shears do where one is given: nothing above the kept height,
+ * nothing farther out than half the kept spread. A kept height lowers the clear stem to 0.6 of itself.
+ */
+export function makeCrown({ x, y, z0, habit }: Axis, natural: Size & { clearStem: Inches }, kept?: Partial<Size>): Crown {
+  const { height, spread, clearStem } = natural
+  const uncut: Crown = { x, y, z0, height, spread, clearStem, habit }
+  if (!kept) return uncut
+  const keptHeight = kept.height ?? Infinity
+  const keptSpread = kept.spread ?? Infinity
+  if (keptHeight >= height && keptSpread >= spread) return uncut
+  const top = Math.min(height, keptHeight)
+  const bottom = Math.min(clearStem, MOST_CLEAR * keptHeight)
+  const low: Crown = { x, y, z0, height: top, spread, clearStem: bottom, habit, natural: { height, spread } }
+  return { ...low, spread: Math.min(2 * radiusAt(low, peakOf(low).from), keptSpread) }
+}
+
+/** Height of the lowest foliage on the z axis. */
+export const footOf = (crown: Crown): Inches => crown.z0 + crown.clearStem
 /** Height of the top on the z axis. */
 export const topOf = (crown: Crown): Inches => crown.z0 + crown.height
-/** Length of the foliage along the axis, uncut. */
-const lengthOf = (crown: Crown) => (crown.natural ?? crown).height - crown.clearStem
-/** Largest radius of the uncut body. */
-const halfOf = (crown: Crown) => (crown.natural ?? crown).spread / 2
+/** Width of the plant had it never been clipped. */
+export const naturalSpread = (crown: Crown): Inches => (crown.natural ?? crown).spread
+const lengthOf = (crown: Crown): Inches => (crown.natural ?? crown).height - crown.clearStem
 
-function profileAt({ base, shoulder, m, n }: Profile, u: number): number {
-  if (u < shoulder) return base + ((1 - base) * u) / shoulder
-  const v = (u - shoulder) / (1 - shoulder)
-  return v >= 1 ? 0 : (1 - v ** m) ** (1 / n)
-}
+/** Heights are compared within this, for the same height comes by different sums. */
+const NOISE = 1e-9
 
 /** Radius of the crown at a height on the z axis; 0 above and below it. */
 export function radiusAt(crown: Crown, z: Inches): Inches {
+  const above = z - footOf(crown)
   const length = lengthOf(crown)
-  if (length <= 0 || z < bottomOf(crown) || z > topOf(crown)) return 0
-  const u = Math.min(1, (z - bottomOf(crown)) / length)
-  return Math.min(halfOf(crown) * profileAt(PROFILES[crown.habit], u), crown.spread / 2)
+  if (above < -NOISE || z - topOf(crown) > NOISE || length <= 0) return 0
+  const radius = (naturalSpread(crown) / 2) * shareAt(PROFILES[crown.habit], Math.min(1, Math.max(0, above / length)))
+  return Math.min(radius, crown.spread / 2)
 }
 
-/** Height at which the uncut crown is widest. */
-const shoulderOf = (crown: Crown) => bottomOf(crown) + PROFILES[crown.habit].shoulder * lengthOf(crown)
+/** The heights between which the crown is widest: one height, or a range where shears cut it straight. */
+function peakOf(crown: Crown): { from: Inches; to: Inches } {
+  const foot = footOf(crown)
+  const length = lengthOf(crown)
+  const top = topOf(crown)
+  const profile = PROFILES[crown.habit]
+  const share = Math.min(1, crown.spread / naturalSpread(crown))
+  if (share >= 1) {
+    const z = Math.min(top, foot + profile.shoulder * length)
+    return { from: z, to: z }
+  }
+  const { from, to } = inverseOf(profile, share)
+  return { from: Math.min(top, foot + from * length), to: Math.min(top, foot + to * length) }
+}
 
 /** The largest radius between two heights; 0 where the crown and the range share no more than a contact. */
 export function reach(crown: Crown, z1: Inches, z2: Inches): Inches {
-  const low = Math.max(z1, bottomOf(crown))
+  const low = Math.max(z1, footOf(crown))
   const high = Math.min(z2, topOf(crown))
   if (high - low <= CONTACT) return 0
-  return radiusAt(crown, Math.min(Math.max(shoulderOf(crown), low), high))
+  const widest = footOf(crown) + PROFILES[crown.habit].shoulder * lengthOf(crown)
+  return radiusAt(crown, Math.min(high, Math.max(low, widest)))
 }
 
 /**
- * The interval of heights at which the crown extends at least `d` from its axis; null where that is no more
- * than a contact. Closed form: the profile rises straight to its shoulder and falls beyond it.
+ * The interval of heights at which the crown extends at least `d` from its axis; null where it extends no more
+ * than a contact past `d`. Closed form: the profile rises straight to its shoulder and falls beyond it.
  */
 export function span(crown: Crown, d: Inches): { from: Inches; to: Inches } | null {
   const length = lengthOf(crown)
-  const half = halfOf(crown)
-  if (length <= 0 || half <= 0 || crown.spread / 2 - d <= CONTACT) return null
-  const { base, shoulder, m, n } = PROFILES[crown.habit]
-  const q = Math.max(0, d) / half
-  const u1 = q <= base || shoulder === 0 ? 0 : (shoulder * (q - base)) / (1 - base)
-  const u2 = shoulder + (1 - shoulder) * (1 - q ** n) ** (1 / m)
-  const from = bottomOf(crown) + u1 * length
-  const to = Math.min(bottomOf(crown) + u2 * length, topOf(crown))
+  if (length <= 0 || crown.spread / 2 - d <= CONTACT) return null
+  const u = inverseOf(PROFILES[crown.habit], Math.max(0, d) / (naturalSpread(crown) / 2))
+  const from = footOf(crown) + u.from * length
+  const to = Math.min(footOf(crown) + u.to * length, topOf(crown))
   return to - from > CONTACT ? { from, to } : null
 }
 
-/** Sum of f over the crown's heights by Simpson's rule, with the steep tip spread out so that it converges fast. */
-function integrate(crown: Crown, f: (radius: Inches) => number): number {
-  const shoulder = Math.min(shoulderOf(crown), topOf(crown))
-  const tip = bottomOf(crown) + lengthOf(crown)
-  const depth = tip - shoulder
-  const below = simpson((z) => f(radiusAt(crown, z)), bottomOf(crown), shoulder)
-  if (depth <= 0) return below
-  // z = tip - depth w^2 takes the square-root edge out of the integrand.
-  const start = Math.sqrt(Math.max(0, tip - topOf(crown)) / depth)
-  return below + simpson((w) => f(radiusAt(crown, Math.min(topOf(crown), tip - depth * w * w))) * 2 * depth * w, start, 1)
+/** Largest sum of the two radii between two heights that both crowns have foliage at. */
+function widestSum(a: Crown, b: Crown, low: Inches, high: Inches): Inches {
+  const clamp = (z: Inches) => Math.min(high, Math.max(low, z))
+  const [one, other] = [peakOf(a), peakOf(b)]
+  const [lower, upper, first, second] = one.from <= other.from ? [a, b, one, other] : [b, a, other, one]
+  const from = clamp(first.to)
+  const to = clamp(second.from)
+  const sum = (z: Inches) => radiusAt(lower, z) + radiusAt(upper, z)
+  // Between the peaks the lower crown draws in, ever faster, while the upper one widens in a straight line.
+  const ends = Math.max(sum(from), sum(to))
+  if (to - from <= NOISE) return ends
+  const profile = PROFILES[upper.habit]
+  const rise = profile.shoulder === 0 ? 0 : ((1 - profile.base) / profile.shoulder) * (naturalSpread(upper) / 2 / lengthOf(upper))
+  const length = lengthOf(lower)
+  const share = (z: Inches) => Math.min(1, Math.max(PROFILES[lower.habit].shoulder, (z - footOf(lower)) / length))
+  const u = whereItFalls(PROFILES[lower.habit], (rise * length) / (naturalSpread(lower) / 2), { from: share(from), to: share(to) })
+  return Math.max(ends, sum(clamp(footOf(lower) + u * length)))
 }
-
-function simpson(f: (t: number) => number, from: number, to: number, steps = 400): number {
-  if (!(to > from)) return 0
-  const h = (to - from) / steps
-  let sum = f(from) + f(to)
-  for (let i = 1; i < steps; i++) sum += f(from + i * h) * (i % 2 === 1 ? 4 : 2)
-  return (sum * h) / 3
-}
-
-/** Volume of the crown, cubic inches. */
-export const crownVolume = (crown: Crown): number => integrate(crown, (radius) => Math.PI * radius * radius)
-
-/** Area of the crown seen square-on, square inches. */
-export const silhouetteArea = (crown: Crown): number => integrate(crown, (radius) => 2 * radius)
 
 /**
- * The crown seen square-on as a closed polygon of { x, z }, from the foot of the foliage on the left over the top
- * and down on the right. Points crowd where it curves.
+ * How far two crowns reach into each other at the height where they do so most; negative where they stand apart by
+ * that much, null where they share no height. `distance` is that of their axes in plan.
+ */
+export function overlapOf(a: Crown, b: Crown, distance: Inches): Inches | null {
+  const low = Math.max(footOf(a), footOf(b))
+  const high = Math.min(topOf(a), topOf(b))
+  return high - low <= CONTACT ? null : widestSum(a, b, low, high) - distance
+}
+
+/** Sums over the crown from the foot up, where `to(u)` is the sum over the natural profile up to u and `straight` that of a cut side. */
+function sumOver(crown: Crown, to: (u: number) => number, straight: number): number {
+  const length = lengthOf(crown)
+  if (length <= 0) return 0
+  const end = Math.min(1, (crown.height - crown.clearStem) / length)
+  const share = crown.spread / naturalSpread(crown)
+  if (share >= 1) return length * to(end)
+  const cut = inverseOf(PROFILES[crown.habit], share)
+  const [from, until] = [Math.min(cut.from, end), Math.min(cut.to, end)]
+  return length * (to(from) + straight * (until - from) + to(end) - to(until))
+}
+
+/** Volume of the crown, cubic inches; closed form, cut or not. */
+export function crownVolume(crown: Crown): number {
+  const radius = naturalSpread(crown) / 2
+  return Math.PI * radius * radius * sumOver(crown, (u) => squareTo(PROFILES[crown.habit], u), (crown.spread / 2 / radius) ** 2)
+}
+
+/** Area of the crown seen square-on, square inches; closed form but for cut crowns of two habits (quadrature). */
+export function silhouetteArea(crown: Crown): number {
+  const radius = naturalSpread(crown) / 2
+  return 2 * radius * sumOver(crown, (u) => widthTo(PROFILES[crown.habit], u), crown.spread / 2 / radius)
+}
+
+/**
+ * The crown seen square-on as a closed polygon of { x, z }: from the foot of the foliage at left over the top and
+ * down at right, the clear stem left out. Every corner of the shape is a point; `steps` more crowd where it curves.
  */
 export function silhouette(crown: Crown, steps = 24): { x: Inches; z: Inches }[] {
-  const low = bottomOf(crown)
+  const foot = footOf(crown)
   const top = topOf(crown)
-  const heights = Array.from({ length: steps + 1 }, (_, i) => low + (top - low) * Math.sin((Math.PI / 2) * (i / steps)))
-  const left = heights.map((z) => ({ x: crown.x - radiusAt(crown, z), z }))
-  const right = heights.map((z) => ({ x: crown.x + radiusAt(crown, z), z }))
-  return [...left, ...right.reverse()]
+  const length = lengthOf(crown)
+  const { shoulder } = PROFILES[crown.habit]
+  const curve = Array.from({ length: steps + 1 }, (_, i) => foot + length * (shoulder + (1 - shoulder) * Math.sin((Math.PI / 2) * (i / steps))))
+  const peak = peakOf(crown)
+  const heights = [foot, peak.from, peak.to, ...curve, top].filter((z) => z >= foot && z <= top).sort((a, b) => a - b)
+  const levels = heights.filter((z, i) => i === 0 || z > heights[i - 1]!)
+  const left = levels.map((z) => ({ x: crown.x - radiusAt(crown, z), z }))
+  const right = levels.map((z) => ({ x: crown.x + radiusAt(crown, z), z })).reverse()
+  return [...left, ...right]
 }

@@ -3,8 +3,8 @@
  * year a size is reached has a closed form. Inches and decimal years since planting.
  */
 import type { Growth, Plant } from '../plants/types'
-import { makeCrown, type Crown } from './crown'
-import { groundAt } from './geometry/wall'
+import { makeCrown, MOST_CLEAR, type Crown } from './crown'
+import { groundAt } from './geometry/ground'
 import type { Bound, ByBound, Facade, Inches, Placement, Size, Source } from './types'
 
 export type When = number | 'mature'
@@ -72,59 +72,74 @@ function yearsToSize(plant: Plant): number {
   return plant.category === 'groundcover' ? GROUNDCOVER_YEARS[plant.growth] : YEARS_TO_SIZE[plant.category as keyof typeof YEARS_TO_SIZE]
 }
 
-/** The pace of one placement at one bound: `share(t) = 1 - exp(-k max(0, t - lag))`. */
-function paceOf(plant: Plant, placement: Placement, zone: string, bound: Bound): { k: number; lag: number } {
-  if (isHerbaceous(plant)) return { k: Math.log(20) / yearsToSize(plant), lag: 0 }
+/** How one placement grows at one bound, from its planted to its mature size: `share(t) = 1 - exp(-k max(0, t - lag))`. */
+export interface Course {
+  planted: Size
+  mature: Size
+  /** Per year; Infinity where there is nothing to gain. */
+  k: number
+  /** Years until it breaks free. */
+  lag: number
+}
+
+/** The course of a placement at one bound. Herbaceous plants take the same time at every bound, and do not wait. */
+export function courseOf({ plant, placement, zone, bound }: Omit<SizeArgs, 'year'>): Course {
+  const { planted } = placement
   const mature = matureSize(plant, placement, bound)
-  const gain = Math.max(mature.height - placement.planted.height, mature.spread - placement.planted.spread)
-  if (gain <= 0) return { k: Infinity, lag: 0 }
+  const gain = Math.max(mature.height - planted.height, mature.spread - planted.spread)
+  if (gain <= 0) return { planted, mature, k: Infinity, lag: 0 }
+  if (isHerbaceous(plant)) return { planted, mature, k: Math.log(20) / yearsToSize(plant), lag: 0 }
   const woody: Woody = plant.category === 'tree' ? 'tree' : isConifer(plant) ? 'conifer' : 'shrub'
   // The hardiness zone stands in, roughly, for the length of the season.
   const season = Math.min(1.4, Math.max(0.76, 1 + 0.08 * (zoneNumber(zone) - 6)))
-  return { k: (RATES[woody][plant.growth][bound] * season) / gain, lag: placement.status === 'stays' ? 0 : LAGS[bound] }
+  return { planted, mature, k: (RATES[woody][plant.growth][bound] * season) / gain, lag: placement.status === 'stays' ? 0 : LAGS[bound] }
 }
 
-/** Natural size at some year, before any clipping. */
-export function sizeAt(args: { plant: Plant; placement: Placement; zone: string; bound: Bound; year: When }): Size {
-  const { plant, placement, zone, bound, year } = args
-  const { planted } = placement
-  const mature = matureSize(plant, placement, bound)
-  if (year === 'mature') return mature
-  const { k, lag } = paceOf(plant, placement, zone, bound)
-  const share = k === Infinity ? 1 : 1 - Math.exp(-k * Math.max(0, year - lag))
+/** Natural size on a course at some year. */
+export function sizeOn({ planted, mature, k, lag }: Course, year: When): Size {
+  if (year === 'mature' || k === Infinity) return mature
+  const share = 1 - Math.exp(-k * Math.max(0, year - lag))
   return {
     height: planted.height + (mature.height - planted.height) * share,
     spread: planted.spread + (mature.spread - planted.spread) * share,
   }
 }
 
+export interface SizeArgs {
+  plant: Plant
+  placement: Placement
+  zone: string
+  bound: Bound
+  year: When
+}
+
+/** Natural size at some year, before any clipping. */
+export const sizeAt = (args: SizeArgs): Size => sizeOn(courseOf(args), args.year)
+
 /** Year at which a height is reached; null where the plant never grows that tall. The closed inverse of `sizeAt`. */
-export function yearOfHeight(args: { plant: Plant; placement: Placement; zone: string; bound: Bound; height: Inches }): number | null {
-  const { plant, placement, zone, bound, height } = args
-  const { planted } = placement
+export function yearOfHeight({ height, ...args }: Omit<SizeArgs, 'year'> & { height: Inches }): number | null {
+  const { planted, mature, k, lag } = courseOf(args)
   if (height <= planted.height) return 0
-  const mature = matureSize(plant, placement, bound)
   if (height >= mature.height) return null
-  const { k, lag } = paceOf(plant, placement, zone, bound)
   return lag - Math.log(1 - (height - planted.height) / (mature.height - planted.height)) / k
 }
 
 const FOLIAGE_TO_GROUND: ReadonlySet<string> = new Set(['pyramidal', 'columnar', 'weeping', 'multi-stem'])
 
-function clearStemOf(plant: Plant, placement: Placement, height: Inches): Inches {
-  if (placement.clearStem !== undefined) return Math.min(placement.clearStem, 0.6 * height)
-  const isLimbedUp =
-    plant.category === 'tree' && !FOLIAGE_TO_GROUND.has(plant.habit) && matureSize(plant, placement, 'expected').height >= 180
-  return isLimbedUp ? 0.15 * height : 0
+/** Share of its height that a tree of some size is limbed up by when nobody says. */
+const LIMBED_UP = 0.15
+const LIMBED_FROM: Inches = 180
+
+/** The clear stem of a placement at a height: as set, at most 0.6 of it; else by kind. */
+export function clearStemOf(plant: Plant, placement: Placement): (height: Inches) => Inches {
+  const set = placement.clearStem
+  if (set !== undefined) return (height) => Math.min(set, MOST_CLEAR * height)
+  const isLimbed = plant.category === 'tree' && !FOLIAGE_TO_GROUND.has(plant.habit) && matureSize(plant, placement, 'expected').height >= LIMBED_FROM
+  return (height) => (isLimbed ? LIMBED_UP * height : 0)
 }
 
-export interface CrownArgs {
-  plant: Plant
-  placement: Placement
-  facade: Facade
-  zone: string
-  bound: Bound
-  year: When
+export interface CrownArgs extends SizeArgs {
+  facade: Pick<Facade, 'wall' | 'grade' | 'fall'>
   /** Leave the kept size out: the plant as it would grow unclipped. */
   natural?: boolean
 }
@@ -134,5 +149,5 @@ export function crownOf(args: CrownArgs): Crown {
   const { plant, placement, facade, natural } = args
   const size = sizeAt(args)
   const axis = { x: placement.x, y: placement.y, z0: groundAt(facade, placement.x, placement.y), habit: plant.habit }
-  return makeCrown(axis, { ...size, clearStem: clearStemOf(plant, placement, size.height) }, natural ? {} : placement.kept)
+  return makeCrown(axis, { ...size, clearStem: clearStemOf(plant, placement)(size.height) }, natural ? undefined : placement.kept)
 }

@@ -68,11 +68,17 @@ function expectedKeeps({ kind, limit, measured }: Finding, below: string): strin
 /** Held findings say what holds them, and what happens once nobody clips. */
 const held = (fits: string, unclipped: string, finding: Finding) => `${fits} only while kept clipped. Left alone it ${unclipped}${when(finding)}.`
 
-const sayByHeight = (what: (finding: Finding, names: Names) => string): Say => (finding, names) => {
-  const limit = what(finding, names)
+const saySill: Say = (finding, names) => {
+  const limit = `the sill of ${names.feature(finding.feature)}`
   if (finding.kind === 'held') return held(`Stays below ${limit}`, `goes ${by(finding)} past it`, finding)
   if (finding.kind === 'note') return `Stands well out from the wall, yet goes ${by(finding)} past ${limit}${when(finding)}.`
   return `${atLargest(finding)}goes ${by(finding)} past ${limit}${when(finding)}.${expectedKeeps(finding, 'below it')}`
+}
+
+const sayGutter: Say = (finding) => {
+  const reaches = `comes ${by(finding)} into the room kept free below the gutter`
+  if (finding.kind === 'held') return held('Keeps clear of the gutter', reaches, finding)
+  return `${atLargest(finding)}${reaches}${when(finding)}.${expectedKeeps(finding, 'below it')}`
 }
 
 /** Where it would stop, for a limit measured as a distance. */
@@ -82,8 +88,8 @@ const sayByDistance = (finding: Finding, clear: string, reaches: string): string
 }
 
 const SAY: Record<string, Say> = {
-  sill: sayByHeight(({ feature }, names) => `the sill of ${names.feature(feature)}`),
-  gutter: sayByHeight(() => 'the room kept free below the gutter'),
+  sill: saySill,
+  gutter: sayGutter,
   'walk-edge': (finding, names) => {
     const walk = names.feature(finding.feature)
     if (finding.year?.latest === 0 && (finding.measured?.low ?? 0) < 0 && finding.excess > 0 && finding.kind === 'conflict') {
@@ -114,7 +120,7 @@ const SAY: Record<string, Say> = {
   },
   hardiness: (finding, _, sheet) =>
     finding.kind === 'conflict'
-      ? `Hardy to zone ${finding.limit} only; this garden is in zone ${sheet.site.zone}.`
+      ? `Hardy from zone ${finding.limit} up; winters here, in zone ${sheet.site.zone}, are colder.`
       : `Grown up to zone ${finding.limit}; this garden, in zone ${sheet.site.zone}, is warmer.`,
   light: (finding, names, sheet) => {
     const plant = sheet.plants.find(({ id }) => id === finding.feature)

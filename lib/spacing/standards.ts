@@ -1,16 +1,19 @@
 import { RULES } from './rules'
 import type { Sheet } from './types'
 
-/** Every setting of every rule at its default. */
-export function defaultStandards(): Record<string, number | string> {
-  const entries = RULES.flatMap(({ meta }): [string, number | string][] => [
-    ...meta.settings.map((setting): [string, number] => [setting.name, setting.default]),
-    ...(meta.fixedKind ? [[`${meta.id}.kind`, meta.fixedKind] as [string, string]] : []),
-  ])
-  return Object.fromEntries(entries)
-}
+export type Standards = Record<string, number | string>
 
-/** The settings in force on a sheet: its own where it has them, else the defaults. One flat record by setting name. */
-export function resolveStandards(sheet: Pick<Sheet, 'standards'>): Record<string, number | string> {
-  return { ...defaultStandards(), ...sheet.standards }
+const DEFAULTS: Readonly<Standards> = Object.freeze(
+  Object.fromEntries(RULES.flatMap(({ meta }) => meta.settings.map((setting) => [setting.name, setting.default]))),
+)
+
+/** Every setting of every rule at its default. */
+export const defaultStandards = (): Standards => ({ ...DEFAULTS })
+
+/**
+ * The settings in force on a sheet: its own where it has them, else the defaults; "<rule>.kind" only where it is set.
+ * One flat record by setting name.
+ */
+export function resolveStandards(sheet: Pick<Sheet, 'standards'>): Standards {
+  return { ...DEFAULTS, ...sheet.standards }
 }

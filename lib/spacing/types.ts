@@ -238,8 +238,8 @@ export interface RuleMeta {
   /** Short label for lists. */
   title: string
   settings: Setting[]
-  /** Present for rules of one fixed kind that a studio may switch between off, note and risk. */
-  fixedKind?: 'note' | 'risk'
+  /** Present for rules whose kind does not come from the bounds: the worst they say. A studio may switch them to off, note or risk. */
+  fixedKind?: 'conflict' | 'risk' | 'note'
   sources: Source[]
   /** Where this rule settles what the source leaves open. */
   notes?: string

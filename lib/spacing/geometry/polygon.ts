@@ -10,11 +10,6 @@ export function nearestOnSegment(p: Point, a: Point, b: Point): Point {
   return { x: a.x + t * dx, y: a.y + t * dy }
 }
 
-export function distanceToSegment(p: Point, a: Point, b: Point): Inches {
-  const near = nearestOnSegment(p, a, b)
-  return Math.hypot(p.x - near.x, p.y - near.y)
-}
-
 /** Signed area: positive where the points run anticlockwise with y up. */
 export function polygonArea(points: readonly Point[]): number {
   let twice = 0
@@ -58,9 +53,12 @@ export function distanceToPolygon(p: Point, points: readonly Point[]): Inches {
   return crossesInside(p, points) ? -distance : distance
 }
 
+/** A point this near a slanted edge is on it: closer than any drawing, farther than the noise of a sum. */
+const ON_EDGE = 1e-6
+
 /** Is the point inside? The edge counts as inside. */
 export function pointInPolygon(p: Point, points: readonly Point[]): boolean {
-  return crossesInside(p, points) || distanceToPolygon(p, points) === 0
+  return crossesInside(p, points) || distanceToPolygon(p, points) <= ON_EDGE
 }
 
 const turn = (a: Point, b: Point, c: Point) => Math.sign((b.x - a.x) * (c.y - a.y) - (b.y - a.y) * (c.x - a.x))
