@@ -1,7 +1,7 @@
 import { judgedPlants } from '../by-plant'
 import type { Rule } from '../rule'
 import type { Finding } from '../types'
-import { finding } from '../verdict'
+import { findingOf } from '../finding'
 
 export const hardiness: Rule = {
   scope: 'sheet',
@@ -10,6 +10,7 @@ export const hardiness: Rule = {
     title: 'Hardiness',
     question: 'Will it live through the winters here?',
     settings: [],
+    fixedKind: 'conflict',
     sources: [{ publisher: 'USDA Agricultural Research Service', title: 'Plant Hardiness Zone Map 2023', address: 'https://planthardiness.ars.usda.gov/', known: 'read' }],
     notes: 'The number of the zone without its half: a plant of zones 4-8 fits 4a to 8b. The zone says nothing of heat, so above the range is a risk.',
   },
@@ -19,11 +20,7 @@ export const hardiness: Rule = {
       const isCold = plant.zoneMin !== null && zone < plant.zoneMin
       const isWarm = plant.zoneMax !== null && zone > plant.zoneMax
       if (!isCold && !isWarm) return []
-      return [finding({
-        rule: 'hardiness', kind: isCold ? 'conflict' : 'risk', placements, feature: plant.id,
-        limit: isCold ? plant.zoneMin : plant.zoneMax,
-        measured: { low: zone, expected: zone, high: zone },
-      })]
+      return [findingOf({ rule: 'hardiness', kind: isCold ? 'conflict' : 'risk', placements, feature: plant.id })]
     })
   },
 }

@@ -1,6 +1,6 @@
 import { judgedPlants } from '../by-plant'
 import type { Rule } from '../rule'
-import { finding } from '../verdict'
+import { findingOf } from '../finding'
 
 export const light: Rule = {
   scope: 'sheet',
@@ -9,6 +9,7 @@ export const light: Rule = {
     title: 'Light',
     question: 'Does it get the light it needs?',
     settings: [],
+    fixedKind: 'risk',
     sources: [
       { publisher: 'K-State Research and Extension, Johnson County', title: 'Sun and shade: full sun 6 h or more, part shade 4 to 6', address: 'https://www.johnson.k-state.edu/programs/lawn-garden/agent-articles-fact-sheets-and-more/agent-articles/environment/sun-shade-conditions.html', known: 'read' },
     ],
@@ -18,6 +19,6 @@ export const light: Rule = {
     judgedPlants(prepared).flatMap(({ plant, placements }) =>
       plant.light.length === 0 || plant.light.includes(prepared.sheet.site.light)
         ? []
-        : [finding({ rule: 'light', kind: 'risk', placements, feature: plant.id })],
+        : [findingOf({ rule: 'light', kind: 'risk', placements, feature: plant.id })],
     ),
 }
