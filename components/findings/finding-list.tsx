@@ -70,7 +70,7 @@ function OneFinding({ finding, sheet, isChosen, isConcerned, onChoose }: { findi
       >
         <KindMark kind={finding.kind} />
         <span className="min-w-0">
-          <span className="block font-heading text-lg leading-tight">{title}</span>
+          <span className="botanical block text-lg leading-tight">{title}</span>
           <span className="block"><span className="font-bold">{KIND_WORDS[finding.kind]}.</span> {sentence}</span>
           {wayOut ? <span className="mt-1 block text-ink-soft">{wayOut}</span> : null}
         </span>

@@ -118,10 +118,13 @@ const SAY: Record<string, Say> = {
     if (finding.kind === 'note') return `A specimen: it ${rises}${when(finding)}.`
     return `${atLargest(finding)}${rises}${when(finding)}.`
   },
-  hardiness: (finding, _, sheet) =>
-    finding.kind === 'conflict'
-      ? `Hardy from zone ${finding.limit} up; winters here, in zone ${sheet.site.zone}, are colder.`
-      : `Grown up to zone ${finding.limit}; this garden, in zone ${sheet.site.zone}, is warmer.`,
+  hardiness: (finding, _, sheet) => {
+    const plant = sheet.plants.find(({ id }) => id === finding.feature)
+    const isCold = plant !== undefined && plant.zoneMin !== null && parseInt(sheet.site.zone, 10) < plant.zoneMin
+    return isCold
+      ? `Hardy from zone ${plant.zoneMin} up; winters here, in zone ${sheet.site.zone}, are colder.`
+      : `Grown up to zone ${plant?.zoneMax ?? '?'}; this garden, in zone ${sheet.site.zone}, is warmer.`
+  },
   light: (finding, names, sheet) => {
     const plant = sheet.plants.find(({ id }) => id === finding.feature)
     return `Wants ${plant?.light.map((light) => LIGHT_WORDS[light]).join(' or ') ?? 'other light'}; this side has ${LIGHT_WORDS[sheet.site.light]}.`
@@ -140,6 +143,6 @@ function titleOf({ rule, placements, feature }: Finding, names: Names): string {
 export function describe(finding: Finding, sheet: Sheet): Description {
   const names = new Names(sheet)
   const say = SAY[finding.rule]
-  if (!say) throw new Error(`No sentence for the rule ${finding.rule}`)
-  return { title: titleOf(finding, names), sentence: say(finding, names, sheet), wayOut: '' }
+  const sentence = say ? say(finding, names, sheet) : `Judged by a rule this version does not know: ${finding.rule}.`
+  return { title: titleOf(finding, names), sentence, wayOut: '' }
 }
