@@ -1,0 +1,2 @@
+export * from './plant-list'
+export * from './csv'
