@@ -1,5 +1,6 @@
 'use client'
 /** Where one is, how saving stands, and the way back. */
+import type { Route } from 'next'
 import Link from 'next/link'
 import { saveLabel } from './editor'
 import { useDesk, useEditorState, useSaveState } from './desk-context'
@@ -33,7 +34,7 @@ export function TopBar({ facade, canListPlants }: { facade: TableFacade; canList
   return (
     <div className="flex min-h-15 flex-wrap items-center gap-x-3 gap-y-1 border-b border-rule px-4 py-1.5">
       <nav aria-label="Where you are" className="mr-auto flex min-w-0 items-center">
-        <Link href={home} className={`${QUIET} -ml-3`}>{facade.projectName}</Link>
+        <Link href={home as Route} className={`${QUIET} -ml-3`}>{facade.projectName}</Link>
         <span aria-hidden="true" className="text-ink-soft">/</span>
         <h1 className="truncate px-3 font-heading text-xl">{facade.name}</h1>
       </nav>
@@ -45,8 +46,8 @@ export function TopBar({ facade, canListPlants }: { facade: TableFacade; canList
         </div>
       ) : null}
       <div className="flex">
-        <Link href={`${here}/measure`} className={QUIET}>Measure</Link>
-        {canListPlants ? <Link href={`${here}/plant-list`} className={QUIET}>Plant list</Link> : null}
+        <Link href={`${here}/measure` as Route} className={QUIET}>Measure</Link>
+        {canListPlants ? <Link href={`${here}/plant-list` as Route} className={QUIET}>Plant list</Link> : null}
       </div>
     </div>
   )

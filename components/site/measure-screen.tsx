@@ -1,5 +1,6 @@
 'use client'
 /** The measure screen of one facade: the numbers on the left, the drawing that follows them on the right. */
+import type { Route } from 'next'
 import { useRouter } from 'next/navigation'
 import { useCallback, useRef, useState, useSyncExternalStore, type KeyboardEvent } from 'react'
 import type { SaveQueue } from '../drawing-table/editor/save-queue'
@@ -58,7 +59,7 @@ function Desk({ queue, facadeName }: { queue: SaveQueue; facadeName: string }) {
   return (
     <div ref={desk} onKeyDown={(event) => (readOnly ? undefined : stepKeys(event, measuring))}>
       <Bar queue={queue} />
-      {leavingTo === null ? null : <LeaveQuestion onStay={() => setLeavingTo(null)} onLeave={() => router.push(leavingTo)} />}
+      {leavingTo === null ? null : <LeaveQuestion onStay={() => setLeavingTo(null)} onLeave={() => router.push(leavingTo as Route)} />}
       {saving.phase.kind === 'conflict' ? (
         <ClashPanel clashes={saving.phase.clashes} onTheirs={() => queue.settle('theirs')} onMine={() => queue.settle('mine')} />
       ) : null}

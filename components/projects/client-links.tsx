@@ -1,0 +1,66 @@
+'use client'
+import { useActionState, useSyncExternalStore } from 'react'
+import { toast } from 'sonner'
+import { Button, Notice, TextField } from '@/components/ui'
+import type { SmallState } from './small-action'
+import { dateText } from './words'
+
+interface Link {
+  id: string
+  createdAt: number
+  expiresAt: number
+  createdBy: string
+}
+
+interface Props {
+  links: readonly Link[]
+  create: () => Promise<SmallState>
+  revoke: (linkId: string) => Promise<SmallState>
+}
+
+const QUIET: SmallState = { error: null, made: null }
+const never = () => () => {}
+/** Where this site stands, known only in the browser. */
+const useOrigin = () => useSyncExternalStore(never, () => window.location.origin, () => '')
+
+async function copy(address: string) {
+  try {
+    await navigator.clipboard.writeText(address)
+    toast('The link is copied.')
+  } catch {
+    toast('The browser would not copy it. Select the link and copy it by hand.')
+  }
+}
+
+function OneLink({ link, revoke }: { link: Link; revoke: Props['revoke'] }) {
+  const [state, send, isPending] = useActionState(() => revoke(link.id), QUIET)
+  return (
+    <li className="flex flex-wrap items-center justify-between gap-3 border-t border-rule py-2">
+      <span>Made {dateText(link.createdAt)} by {link.createdBy}, opens until {dateText(link.expiresAt)}</span>
+      <form action={send}><Button type="submit" variant="danger" disabled={isPending} aria-label={`Revoke the link made ${dateText(link.createdAt)} by ${link.createdBy}`}>Revoke</Button></form>
+      {state.error && <Notice tone="error">{state.error}</Notice>}
+    </li>
+  )
+}
+
+/** The client's way in: a new link is shown once, live ones can be revoked. */
+export function ClientLinks({ links, create, revoke }: Props) {
+  const [state, send, isPending] = useActionState(create, QUIET)
+  const origin = useOrigin()
+  const address = state.made ? `${origin}${state.made}` : null
+  return (
+    <section aria-labelledby="client-links" className="grid gap-3 border border-rule bg-sheet p-4">
+      <h2 id="client-links" className="font-heading text-2xl">For the client</h2>
+      <p>A link opens the drawing of this project, without findings, notes or other projects. Whoever has it can look.</p>
+      {state.error && <Notice tone="error">{state.error}</Notice>}
+      {address && (
+        <div className="flex flex-wrap items-end gap-3">
+          <TextField label="The new link" hint="Shown this once. Send it to the client." value={address} readOnly className="min-w-64 flex-1" onFocus={(event) => event.target.select()} />
+          <Button onClick={() => void copy(address)} className="mb-7">Copy it</Button>
+        </div>
+      )}
+      <form action={send}><Button type="submit" disabled={isPending}>Make a client link</Button></form>
+      {links.length > 0 && <ul>{links.map((link) => <OneLink key={link.id} link={link} revoke={revoke} />)}</ul>}
+    </section>
+  )
+}

@@ -1,0 +1,42 @@
+import { FindingCounts } from '@/components/findings/finding-counts'
+import { dateText } from '@/components/projects/words'
+import { LinkButton } from '@/components/ui'
+import { STAGE_WORDS, type Stage } from '@/lib/project'
+import type { FindingKind } from '@/lib/spacing'
+
+interface Item {
+  facadeId: string
+  facadeName: string
+  projectId: string
+  projectName: string
+  stage: Stage
+  counts: Record<FindingKind, number>
+  placements: number
+  updatedAt: number
+}
+
+/** The facades that want a second look, each with the way to its drawing. */
+export function QueueTable({ items }: { items: readonly Item[] }) {
+  return (
+    <div className="overflow-x-auto border border-rule bg-sheet" role="region" aria-label="Facades to review" tabIndex={0}>
+      <table className="w-full border-collapse">
+        <thead>
+          <tr>{['Project', 'Facade', 'Stage', 'Findings', 'Plants', 'Changed', ''].map((head) => <th key={head} scope="col" className="px-3 py-2 text-left">{head || <span className="sr-only">Drawing</span>}</th>)}</tr>
+        </thead>
+        <tbody>
+          {items.map((item) => (
+            <tr key={item.facadeId} className="border-t border-rule">
+              <th scope="row" className="px-3 py-2 text-left font-heading text-lg font-normal">{item.projectName}</th>
+              <td className="px-3 py-2">{item.facadeName}</td>
+              <td className="px-3 py-2">{STAGE_WORDS[item.stage]}</td>
+              <td className="px-3 py-2"><FindingCounts counts={item.counts} /></td>
+              <td className="px-3 py-2 font-mono tabular-nums">{item.placements}</td>
+              <td className="px-3 py-2 whitespace-nowrap">{dateText(item.updatedAt)}</td>
+              <td className="px-3 py-2"><LinkButton href={`/projects/${item.projectId}/facades/${item.facadeId}`} aria-label={`Look at ${item.projectName}, ${item.facadeName}`}>Look</LinkButton></td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </div>
+  )
+}
