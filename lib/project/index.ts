@@ -14,3 +14,5 @@ export const STAGE_WORDS: Record<Stage, string> = {
 }
 
 export * from './schema'
+export * from './form'
+export * from './words'

@@ -2,6 +2,8 @@ import type { Metadata, Route } from 'next'
 import { redirect } from 'next/navigation'
 import { SignInForm } from '@/components/people/sign-in-form'
 import { sitePath } from '@/lib/server/http/site-path'
+import { anonymousContext } from '@/lib/server/people/anonymous-context'
+import { listDemoSignIns } from '@/lib/server/people/list-demo-sign-ins'
 import { readActor } from '@/lib/server/people/session'
 import { signInAction } from './actions'
 
@@ -22,7 +24,7 @@ export default async function SignInPage({ searchParams }: Props) {
       <h1 className="mt-6 font-heading text-4xl leading-tight">Sign in</h1>
       <p className="mt-2 text-ink-soft">House fronts drawn with their plants at the size they grow to.</p>
       <div className="mt-6 border border-rule bg-sheet p-5">
-        <SignInForm action={signInAction} next={next} />
+        <SignInForm action={signInAction} next={next} demo={listDemoSignIns(anonymousContext())} />
       </div>
       <p className="mt-5 text-ink-soft">Came for your own garden? Open the link your designer sent you; it needs no password.</p>
     </main>

@@ -19,17 +19,21 @@ const UNMEASURED: Facade = {
   fall: 0.05, gutter: 108, overhang: 16, siding: 'lap', exposed: 8, mulch: 2,
 }
 
-const inputSchema = z.strictObject({ name: facadeNameSchema, width: z.number().gt(0, { error: 'The wall must have a width.' }).optional() })
+const inputSchema = z.strictObject({
+  name: facadeNameSchema,
+  width: z.number().gt(0, { error: 'The wall must have a width.' }).optional(),
+  gutter: z.number().gt(0, { error: 'The gutter must stand above the soil.' }).optional(),
+})
 
 /**
  * Adds a facade to a project; everything on it comes by edits.
- * @param input name, and the width of the wall in inches if it is known. Throws AppError('invalid' | 'not-found').
+ * @param input name, and the width of the wall and the height of the gutter in inches where they are known. Throws AppError('invalid' | 'not-found').
  */
-export function createFacade(context: Context, { projectId, ...input }: { projectId: string; name: unknown; width?: unknown }): { id: string } {
+export function createFacade(context: Context, { projectId, ...input }: { projectId: string; name: unknown; width?: unknown; gutter?: unknown }): { id: string } {
   authorize(context, 'project:edit')
   const { db, actor, now } = context
-  const { name, width = 360 } = parseInput(inputSchema, input)
-  const facade = parseInput(facadeSchema, { ...UNMEASURED, wall: [{ x: 0, y: 0 }, { x: width, y: 0 }] })
+  const { name, width = 360, gutter = UNMEASURED.gutter } = parseInput(inputSchema, input)
+  const facade = parseInput(facadeSchema, { ...UNMEASURED, gutter, wall: [{ x: 0, y: 0 }, { x: width, y: 0 }] })
   return transact(db, () => {
     const project = findProject(context, projectId)
     const id = newId()
