@@ -8,7 +8,7 @@ export interface Demo {
 /** The accounts of the demonstration; one tap fills the form with one of them. */
 export function DemoSignIns({ demo, onPick }: { demo: Demo; onPick: (email: string, password: string) => void }) {
   return (
-    <section aria-labelledby="demo-title" className="mt-2 border-t border-rule pt-4">
+    <section aria-labelledby="demo-title" className="mt-5 border-t border-rule pt-4">
       <h2 id="demo-title" className="font-heading text-xl">This is the demonstration</h2>
       <p className="text-ink-soft">Tap a person to fill the form. Everyone&apos;s password: <span className="font-mono text-ink">{demo.password}</span></p>
       {demo.studios.map((studio) => (
@@ -17,8 +17,8 @@ export function DemoSignIns({ demo, onPick }: { demo: Demo; onPick: (email: stri
           <ul className="mt-1 grid gap-2">
             {studio.people.map(({ name, email, role }) => (
               <li key={email}>
-                <Button onClick={() => onPick(email, demo.password)} className="w-full flex-wrap justify-between gap-x-4 py-1.5 text-left">
-                  <span className="min-w-0"><span className="block font-bold">{name}</span><span className="block text-sm break-all text-ink-soft">{email}</span></span>
+                <Button onClick={() => onPick(email, demo.password)} className="w-full py-1.5">
+                  <span className="min-w-0 flex-1 text-left"><span className="block font-bold">{name}</span><span className="block text-sm break-all text-ink-soft">{email}</span></span>
                   <span className="text-sm text-ink-soft">{role}</span>
                 </Button>
               </li>

@@ -31,8 +31,12 @@ export const projectFormSchema = z
     latitude: degrees('Latitude', ['N', 'S']),
     longitude: degrees('Longitude', ['E', 'W']),
   })
-  .transform(({ latitude, longitude, ...rest }) => ({ ...rest, ...(latitude !== undefined && { latitude }), ...(longitude !== undefined && { longitude }) }))
-  .pipe(projectInputSchema)
+  .transform(({ latitude, longitude, ...rest }, context): ProjectInput => {
+    const judged = projectInputSchema.safeParse({ ...rest, ...(latitude !== undefined && { latitude }), ...(longitude !== undefined && { longitude }) })
+    if (judged.success) return judged.data
+    for (const { path, message } of judged.error.issues) context.addIssue({ code: 'custom', path, message })
+    return z.NEVER
+  })
 
 export type ProjectFormValues = z.input<typeof projectFormSchema>
 

@@ -82,6 +82,11 @@ export const PAGES: PageEndpoint[] = [
   { file: 'app/page.tsx', path: () => '/', outcome: members({ owner: '/projects', designer: '/projects', reviewer: '/projects', estimator: '/projects', stranger: '/projects' }) },
   { file: 'app/(public)/sign-in/page.tsx', path: () => '/sign-in', outcome: { owner: '/projects', designer: '/projects', reviewer: '/projects', estimator: '/projects', stranger: '/projects', client: 'shown', otherClient: 'shown', nobody: 'shown' } },
   { file: 'app/(studio)/account/page.tsx', path: () => '/account', outcome: members() },
+  { file: 'app/(studio)/projects/page.tsx', path: () => '/projects', outcome: members() },
+  { file: 'app/(studio)/projects/new/page.tsx', path: () => '/projects/new', outcome: members({ reviewer: '/projects', estimator: '/projects' }) },
+  { file: 'app/(studio)/projects/[projectId]/page.tsx', path: ({ projectId }) => `/projects/${projectId}`, outcome: ofTheStudio() },
+  { file: 'app/(studio)/review/page.tsx', path: () => '/review', outcome: members({ estimator: '/projects' }) },
+  { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/plant-list/page.tsx', path: drawing('/plant-list'), outcome: ofTheStudio() },
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/page.tsx', path: drawing(), outcome: ofTheStudio() },
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/measure/page.tsx', path: drawing('/measure'), outcome: ofTheStudio() },
   { file: 'app/(studio)/plants/page.tsx', path: () => '/plants', outcome: members() },
@@ -96,6 +101,13 @@ export const PAGES: PageEndpoint[] = [
 export const ACTIONS: ActionEndpoint[] = [
   { file: 'app/(public)/sign-in/actions.ts', actions: { signInAction: null } },
   { file: 'app/(studio)/account/actions.ts', actions: { changePasswordAction: 'own-password:change', signOutAction: null } },
+  {
+    file: 'app/(studio)/projects/actions.ts',
+    actions: {
+      createProjectAction: 'project:create', saveProjectAction: 'project:edit', addFacadeAction: 'project:edit', renameFacadeAction: 'project:edit',
+      removeFacadeAction: 'project:edit', createClientLinkAction: 'client-link:create', revokeClientLinkAction: 'client-link:create',
+    },
+  },
   { file: 'app/(studio)/plants/actions.ts', actions: { createPlantAction: 'plant:edit', savePlantAction: 'plant:edit', removePlantAction: 'plant:edit' } },
   { file: 'app/(public)/c/[token]/open-garden.ts', actions: { openGarden: null } },
 ]

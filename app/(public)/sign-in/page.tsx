@@ -22,7 +22,7 @@ export default async function SignInPage({ searchParams }: Props) {
     <main className="mx-auto flex min-h-dvh max-w-md flex-col justify-center px-5 py-10">
       <p className="border-b border-ink pb-1 font-heading text-lg italic">Tenth Summer</p>
       <h1 className="mt-6 font-heading text-4xl leading-tight">Sign in</h1>
-      <p className="mt-2 text-ink-soft">House fronts drawn with their plants at the size they grow to.</p>
+      <p className="mt-2 text-balance text-ink-soft">House fronts drawn with their plants at the size they grow to.</p>
       <div className="mt-6 border border-rule bg-sheet p-5">
         <SignInForm action={signInAction} next={next} demo={listDemoSignIns(anonymousContext())} />
       </div>
