@@ -22,7 +22,7 @@ export function PageHeader({ title, crumbs = [], actions, children }: PageHeader
   return (
     <header className="border-b border-rule pb-4">
       {crumbs.length > 0 && (
-        <nav aria-label="The way up">
+        <nav aria-label="The way up" className="print:hidden">
           <ol className="flex flex-wrap items-center gap-x-2 text-ink-soft">
             {crumbs.map(({ href, label }) => (
               <li key={href} className="flex items-center gap-2">

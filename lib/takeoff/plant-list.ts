@@ -15,6 +15,8 @@ export interface PlantListRow {
   matureSpread: { min: Inches; max: Inches }
   /** Middle distance from each to its nearest like plant; null where it stands alone. */
   spacing: Inches | null
+  /** These stand there already and stay: nothing to buy. */
+  isExisting: boolean
   remarks: string
 }
 
@@ -57,7 +59,7 @@ function rowOf(plant: Plant, key: string, placements: Placement[]): PlantListRow
     plantedHeight: planted.height, plantedSpread: planted.spread,
     matureHeight: { min: plant.heightMin, max: plant.heightMax },
     matureSpread: { min: plant.spreadMin, max: plant.spreadMax },
-    spacing: spacingOf(placements), remarks: remarksOf(placements),
+    spacing: spacingOf(placements), isExisting: placements[0]!.status === 'stays', remarks: remarksOf(placements),
   }
 }
 
@@ -83,5 +85,13 @@ export function buildPlantList(sheet: Pick<Sheet, 'plants' | 'placements'>): Pla
     })
 }
 
+const sum = (rows: readonly PlantListRow[]) => rows.reduce((total, { quantity }) => total + quantity, 0)
+
 /** How many plants the rows hold together. */
-export const totalOf = (rows: readonly PlantListRow[]): number => rows.reduce((sum, { quantity }) => sum + quantity, 0)
+export const totalOf = (rows: readonly PlantListRow[]): number => sum(rows)
+
+/** How many of them are new, to be bought and planted, and how many stand there already. */
+export const partsOf = (rows: readonly PlantListRow[]): { fresh: number; existing: number } => ({
+  fresh: sum(rows.filter((row) => !row.isExisting)),
+  existing: sum(rows.filter((row) => row.isExisting)),
+})

@@ -3,7 +3,7 @@ import fc from 'fast-check'
 import Papa from 'papaparse'
 import { describe, expect, it } from 'vitest'
 import type { Placement } from '@/lib/spacing'
-import { buildPlantList, harmless, plantListCsv, totalOf } from '@/lib/takeoff'
+import { buildPlantList, harmless, partsOf, plantListCsv, totalOf } from '@/lib/takeoff'
 import { makePlacement, makePlant } from '../../support/sheets'
 
 const plants = [makePlant({ id: 'p1', botanical: "Ilex glabra 'Shamrock'" }), makePlant({ id: 'p2', botanical: 'Nepeta racemosa' })]
@@ -29,7 +29,9 @@ describe('the plant list', () => {
     const any = fc.array(fc.record({ plant: fc.constantFrom('p1', 'p2'), x: fc.integer({ min: 0, max: 500 }), size: fc.constantFrom(12, 18), status: fc.constantFrom('new' as const, 'stays' as const, 'goes' as const) }), { maxLength: 60 })
     fc.assert(fc.property(any, (list) => {
       const placements = list.map(({ plant, x, size, status }, i) => at(`n${i}`, x, { plant, status, planted: { height: size, spread: size } }))
-      expect(totalOf(buildPlantList({ plants, placements }))).toBe(placements.filter(({ status }) => status !== 'goes').length)
+      const rows = buildPlantList({ plants, placements })
+      expect(totalOf(rows)).toBe(placements.filter(({ status }) => status !== 'goes').length)
+      expect(partsOf(rows)).toEqual({ fresh: placements.filter(({ status }) => status === 'new').length, existing: placements.filter(({ status }) => status === 'stays').length })
     }), { seed: 20261201 })
   })
 })

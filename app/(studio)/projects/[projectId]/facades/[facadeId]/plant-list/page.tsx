@@ -6,7 +6,6 @@ import { AppError } from '@/lib/errors'
 import type { Context } from '@/lib/server/context'
 import { requireContext } from '@/lib/server/people/require-context'
 import { getPlantList } from '@/lib/server/takeoffs/get-plant-list'
-import { totalOf } from '@/lib/takeoff'
 
 export const metadata: Metadata = { title: 'Plant list' }
 
@@ -36,13 +35,13 @@ export default async function PlantListPage({ params }: Props) {
     <main className="mx-auto grid max-w-7xl grid-cols-1 gap-4 px-4 py-6">
       <PageHeader
         title="Plant list" crumbs={crumbs}
-        actions={rows.length > 0 && <><a href={file} download className={buttonClass()}>Download CSV</a><a href={`${file}?bom=1`} download className={buttonClass()}>Download CSV for spreadsheets</a></>}
+        actions={rows.length > 0 && <><a href={file} download className={buttonClass()}>Download as CSV</a><a href={`${file}?bom=1`} download className={buttonClass('primary')}>Download for spreadsheets</a></>}
       >
-        Counted from the drawing as it was saved last. {rows.length > 0 && 'Spreadsheets that show odd signs instead of × or accents want the second file: it begins with a byte order mark.'}
+        <p>{facade.projectName}, {facade.name}. Counted from the drawing as it was saved last.</p>
       </PageHeader>
       {rows.length === 0
         ? <EmptyState title="Nothing to count yet" action={<LinkButton href={table} variant="primary">Open the drawing table</LinkButton>}>Plants placed on this facade are counted here.</EmptyState>
-        : <PlantListTable rows={rows} total={totalOf(rows)} />}
+        : <><PlantListTable rows={rows} /><p className="max-w-prose text-ink-soft print:hidden">Both files are CSV in UTF-8, lengths in inches. The one for spreadsheets begins with a mark that lets them show × and accents rightly; other programs may want the one without.</p></>}
     </main>
   )
 }
