@@ -61,7 +61,7 @@ function OneLink({ link, revoke, onRevoked }: { link: Link; revoke: Props['revok
       <span>Made <When at={link.createdAt} /> by {link.createdBy}, opens until <When at={link.expiresAt} to="day" /></span>
       <Dialog
         title="Revoke this link?" description="It opens nothing from then on, and the client is signed out. You can make another." open={isOpen} onOpenChange={setOpen}
-        trigger={<Button variant="quiet" className="-mr-4">Revoke<span className="sr-only"> the link made by {link.createdBy}</span></Button>}
+        trigger={<Button variant="quiet" className="-mx-4">Revoke<span className="sr-only"> the link made by {link.createdBy}</span></Button>}
       >
         <div className="grid gap-4">
           {error && <Notice tone="error">{error}</Notice>}

@@ -43,7 +43,7 @@ function Rename({ facade, rename }: Omit<Props, 'remove'>) {
     setOpen(wanted)
   }
   return (
-    <Dialog title={`Rename ${facade.name}`} open={isOpen} onOpenChange={open} trigger={<Button variant="quiet" className="-ml-3 px-3" aria-label={`Rename ${facade.name}`}>Rename</Button>}>
+    <Dialog title={`Rename ${facade.name}`} open={isOpen} onOpenChange={open} trigger={<Button variant="quiet" className="-ml-4" aria-label={`Rename ${facade.name}`}>Rename</Button>}>
       <form className="grid gap-4" onSubmit={(event) => { event.preventDefault(); run() }}>
         <TextField label="Name" value={name} onChange={(event) => setName(event.target.value)} maxLength={80} error={error} autoComplete="off" />
         <Button type="submit" variant="primary" aria-disabled={isBusy} className="justify-self-start">{isBusy ? 'Renaming' : 'Rename'}</Button>
@@ -60,7 +60,7 @@ function Remove({ facade, remove }: Omit<Props, 'rename'>) {
   return (
     <Dialog
       title={`Remove ${facade.name}?`} description={`${withWhat(facade.placements)} This cannot be undone.`} open={isOpen} onOpenChange={setOpen}
-      trigger={<Button variant="quiet" className="px-3" aria-label={`Remove ${facade.name}`}>Remove</Button>}
+      trigger={<Button variant="quiet" aria-label={`Remove ${facade.name}`}>Remove</Button>}
     >
       <div className="grid gap-4">
         {error && <Notice tone="error">{error}</Notice>}

@@ -17,6 +17,7 @@ interface ProjectLine {
   facades: readonly { id: string; name: string }[]
   /** Over all facades. */
   counts: Readonly<Record<FindingKind, number>>
+  placements: number
   updatedAt: number
 }
 
@@ -38,7 +39,7 @@ function FacadeLinks({ id, facades }: Pick<ProjectLine, 'id' | 'facades'>) {
     <ul className="flex flex-wrap gap-x-4">
       {facades.map((facade) => (
         <li key={facade.id}>
-          <Link href={`/projects/${id}/facades/${facade.id}` as Route} className="-my-2 inline-flex min-h-11 items-center underline decoration-rule underline-offset-4 hover:decoration-ink">{facade.name}</Link>
+          <Link href={`/projects/${id}/facades/${facade.id}` as Route} className="-my-2.5 inline-flex min-h-11 items-center underline decoration-rule underline-offset-4 hover:decoration-ink">{facade.name}</Link>
         </li>
       ))}
     </ul>
@@ -46,13 +47,13 @@ function FacadeLinks({ id, facades }: Pick<ProjectLine, 'id' | 'facades'>) {
 }
 
 function Line({ project }: { project: ProjectLine }) {
-  const { id, name, address, clientName, stage, zone, facades, counts, updatedAt } = project
+  const { id, name, address, clientName, stage, zone, facades, counts, placements, updatedAt } = project
   return (
     <li className="border-t border-rule first:border-t-0">
       <article aria-label={name} className={`px-4 py-4 ${COLUMNS}`}>
         <div className="min-w-0 pb-3 lg:pb-0">
           <h2 className="font-heading text-xl leading-tight break-words">
-            <Link href={`/projects/${id}` as Route} className="-my-2 inline-flex min-h-11 items-center underline decoration-rule underline-offset-4 hover:decoration-ink">{name}</Link>
+            <Link href={`/projects/${id}` as Route} className="-my-2.5 inline-flex min-h-11 items-center underline decoration-rule underline-offset-4 hover:decoration-ink">{name}</Link>
           </h2>
           {address && <p className="break-words text-ink-soft">{address}</p>}
           {clientName && <p className="break-words text-ink-soft">for {clientName}</p>}
@@ -61,7 +62,7 @@ function Line({ project }: { project: ProjectLine }) {
           <Cell label="Stage"><StageBadge stage={stage} /></Cell>
           <Cell label="Zone"><span className="font-mono">{zone}</span></Cell>
           <Cell label="Facades"><FacadeLinks id={id} facades={facades} /></Cell>
-          <Cell label="Findings"><FindingCounts counts={counts} none={facades.length === 0 ? 'Nothing drawn yet' : 'Nothing outgrows its place'} /></Cell>
+          <Cell label="Findings"><FindingCounts counts={counts} none={placements === 0 ? 'Nothing planted yet' : 'Nothing outgrows its place'} /></Cell>
           <Cell label="Changed" className="text-ink-soft"><When at={updatedAt} /></Cell>
         </dl>
       </article>

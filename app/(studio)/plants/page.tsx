@@ -32,7 +32,7 @@ export default async function PlantsPage({ searchParams }: { searchParams: Promi
   const count = countText(total, isNarrowed(query))
   const bad = Object.fromEntries(problems.map(({ field }) => [field, String(typed[field] ?? '')]))
   return (
-    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-4 px-4 py-6">
+    <main className="mx-auto grid max-w-[90rem] grid-cols-1 gap-4 px-4 py-6">
       <PageHeader title="Plants" actions={canEdit && <><LinkButton href="/plants/import">Import plants</LinkButton><LinkButton href="/plants/new" variant="primary">Add a plant</LinkButton></>} />
       <PlantFilters query={query} problems={problems} typed={bad} />
       <p role="status" className="text-lg">{count}{problems.length > 0 && '. What could not be read was left out.'}</p>

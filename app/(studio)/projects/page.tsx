@@ -34,7 +34,7 @@ export default async function ProjectsPage({ searchParams }: Props) {
   const shown = all.filter(({ name, address, clientName }) => [name, address, clientName].some((text) => text.toLocaleLowerCase('en-US').includes(wanted)))
   const add = can(context.actor.role, 'project:create') && NEW
   return (
-    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-5 px-4 py-6">
+    <main className="mx-auto grid max-w-[90rem] grid-cols-1 gap-5 px-4 py-6">
       <PageHeader title="Projects" actions={all.length > 0 && add} />
       {(all.length > IN_SIGHT || typed) && <Search typed={typed} found={shown.length} />}
       {all.length === 0 && <EmptyState title="No projects yet" action={add}>A project is one commission at one property. Its house fronts are measured and planted here.</EmptyState>}

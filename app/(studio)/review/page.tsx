@@ -18,7 +18,7 @@ export default async function ReviewPage() {
   const waiting = all.filter(({ counts }) => FINDING_KINDS.some((kind) => counts[kind] > 0))
   const quiet = all.length - waiting.length
   return (
-    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-5 px-4 py-6">
+    <main className="mx-auto grid max-w-[90rem] grid-cols-1 gap-5 px-4 py-6">
       <PageHeader title="Review">Facades on which the check found something, most conflicts first.</PageHeader>
       {waiting.length === 0
         ? <EmptyState title="Nothing to look at" action={<LinkButton href="/projects">Go to the projects</LinkButton>}>Facades with conflicts, risks, held plants or notes are listed here.</EmptyState>

@@ -69,7 +69,7 @@ export default async function ProjectOverview({ params }: Props) {
   const canEdit = can(context.actor.role, 'project:edit')
   const add = canEdit && <AddFacade add={addFacadeAction.bind(null, projectId)} isFirst={facades.length === 0} />
   return (
-    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-8 px-4 py-6">
+    <main className="mx-auto grid max-w-[90rem] grid-cols-1 gap-8 px-4 py-6">
       <PageHeader title={input.name} crumbs={[{ href: '/projects', label: 'Projects' }]}>
         <p className="flex flex-wrap items-center gap-x-3 gap-y-1"><StageBadge stage={project.stage} />{[input.address, input.clientName && `for ${input.clientName}`].filter(Boolean).join(', ')}</p>
       </PageHeader>

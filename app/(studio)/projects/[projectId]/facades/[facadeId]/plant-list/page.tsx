@@ -32,7 +32,7 @@ export default async function PlantListPage({ params }: Props) {
   const file = `/api/facades/${facadeId}/plant-list`
   const crumbs = [{ href: '/projects', label: 'Projects' }, { href: `/projects/${projectId}`, label: facade.projectName }, { href: table, label: facade.name }]
   return (
-    <main className="mx-auto grid max-w-7xl grid-cols-1 gap-4 px-4 py-6">
+    <main className="mx-auto grid max-w-[90rem] grid-cols-1 gap-4 px-4 py-6">
       <PageHeader
         title="Plant list" crumbs={crumbs}
         actions={rows.length > 0 && <><a href={file} download className={buttonClass()}>Download as CSV</a><a href={`${file}?bom=1`} download className={buttonClass('primary')}>Download for spreadsheets</a></>}
