@@ -69,7 +69,8 @@ export async function createProjectAction(_before: ProjectState, form: FormData)
 export async function saveProjectAction(projectId: string, _before: ProjectState, form: FormData): Promise<ProjectState> {
   const context = await requireContext('member')
   const typed = typedIn(form)
-  const version = Number(textOf(form, 'version'))
+  // No version is no version: an empty text must not pass for 0.
+  const version = Number(textOf(form, 'version') || Number.NaN)
   const answer = await runAction('save project', () => saveProject(context, { projectId, input: inputOf(typed), version }))
   if (!answer.ok) return refused(answer.error, typed)
   revalidatePath(`/projects/${projectId}`)
