@@ -64,7 +64,8 @@ export async function createProjectAction(_before: ProjectState, form: FormData)
 export async function saveProjectAction(projectId: string, _before: ProjectState, form: FormData): Promise<ProjectState> {
   const context = await requireContext('member')
   const typed = typedIn(form)
-  const version = Number(textOf(form, 'version'))
+  // An absent version is no version: it must not pass for the first one.
+  const version = Number(textOf(form, 'version') || NaN)
   const answer = await runAction('save project', () => saveProject(context, { projectId, input: inputOf(typed), version }))
   if (!answer.ok) return refused(answer.error, typed)
   revalidatePath(`/projects/${projectId}`)
