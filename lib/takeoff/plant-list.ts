@@ -13,12 +13,22 @@ export interface PlantListRow {
   plantedSpread: Inches
   matureHeight: { min: Inches; max: Inches }
   matureSpread: { min: Inches; max: Inches }
-  /** Middle distance from each to its nearest like plant; null where it stands alone. */
+  /** Middle distance from each to the nearest other of its plant, of whatever size; null where the drawing has one alone. */
   spacing: Inches | null
   remarks: string
 }
 
 const groupOf = ({ plant, planted, status }: Placement) => JSON.stringify([plant, planted.height, planted.spread, status === 'stays'])
+
+function gathered(placements: readonly Placement[], nameOf: (placement: Placement) => string): Map<string, Placement[]> {
+  const groups = new Map<string, Placement[]>()
+  for (const placement of placements) {
+    const group = groups.get(nameOf(placement))
+    if (group) group.push(placement)
+    else groups.set(nameOf(placement), [placement])
+  }
+  return groups
+}
 
 function middle(numbers: number[]): number {
   const sorted = [...numbers].sort((a, b) => a - b)
@@ -26,9 +36,14 @@ function middle(numbers: number[]): number {
   return sorted.length % 2 === 1 ? sorted[half]! : (sorted[half - 1]! + sorted[half]!) / 2
 }
 
-function spacingOf(placements: Placement[]): Inches | null {
-  if (placements.length < 2) return null
-  return middle(placements.map((one) => Math.min(...placements.filter((other) => other !== one).map((other) => Math.hypot(one.x - other.x, one.y - other.y)))))
+/** From each of the group to the nearest other of its plant, whatever the size of that one at planting. */
+function spacingOf(group: readonly Placement[], like: readonly Placement[]): Inches | null {
+  if (like.length < 2) return null
+  return middle(group.map((one) => {
+    let nearest = Infinity
+    for (const other of like) if (other !== one) nearest = Math.min(nearest, Math.hypot(one.x - other.x, one.y - other.y))
+    return nearest
+  }))
 }
 
 const inchesText = (length: number) => `${Math.round(length * 10) / 10} in`
@@ -50,14 +65,14 @@ function remarksOf(placements: Placement[]): string {
   return [...new Set(said.filter((word) => word !== null))].join('; ')
 }
 
-function rowOf(plant: Plant, key: string, placements: Placement[]): PlantListRow {
+function rowOf(plant: Plant, key: string, placements: Placement[], like: Placement[]): PlantListRow {
   const { planted } = placements[0]!
   return {
     key, quantity: placements.length, botanical: plant.botanical, common: plant.common,
     plantedHeight: planted.height, plantedSpread: planted.spread,
     matureHeight: { min: plant.heightMin, max: plant.heightMax },
     matureSpread: { min: plant.spreadMin, max: plant.spreadMax },
-    spacing: spacingOf(placements), remarks: remarksOf(placements),
+    spacing: spacingOf(placements, like), remarks: remarksOf(placements),
   }
 }
 
@@ -68,18 +83,14 @@ function rowOf(plant: Plant, key: string, placements: Placement[]): PlantListRow
 export function buildPlantList(sheet: Pick<Sheet, 'plants' | 'placements'>): PlantListRow[] {
   const keys = plantKeys(sheet)
   const plants = new Map(sheet.plants.map((plant) => [plant.id, plant]))
-  const groups = new Map<string, Placement[]>()
-  for (const placement of sheet.placements) {
-    if (placement.status === 'goes') continue
-    const name = groupOf(placement)
-    groups.set(name, [...(groups.get(name) ?? []), placement])
-  }
+  const drawn = sheet.placements.filter(({ status }) => status !== 'goes')
+  const alike = gathered(drawn, ({ plant }) => plant)
   const order = [...keys.keys()]
-  return [...groups.values()]
+  return [...gathered(drawn, groupOf).values()]
     .sort((a, b) => order.indexOf(a[0]!.plant) - order.indexOf(b[0]!.plant))
     .flatMap((placements) => {
       const plant = plants.get(placements[0]!.plant)
-      return plant ? [rowOf(plant, keys.get(plant.id) ?? '', placements)] : []
+      return plant ? [rowOf(plant, keys.get(plant.id) ?? '', placements, alike.get(plant.id) ?? [])] : []
     })
 }
 
