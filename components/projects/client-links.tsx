@@ -2,7 +2,7 @@
 import { useActionState, useSyncExternalStore } from 'react'
 import { toast } from 'sonner'
 import { Button, Notice, TextField } from '@/components/ui'
-import type { SmallState } from './small-action'
+import { UNTRIED, type SmallState } from './small-action'
 import { dateText } from './words'
 
 interface Link {
@@ -14,11 +14,12 @@ interface Link {
 
 interface Props {
   links: readonly Link[]
+  /** How long a new link opens the garden. */
+  days: number
   create: () => Promise<SmallState>
   revoke: (linkId: string) => Promise<SmallState>
 }
 
-const QUIET: SmallState = { error: null, made: null }
 const never = () => () => {}
 /** Where this site stands, known only in the browser. */
 const useOrigin = () => useSyncExternalStore(never, () => window.location.origin, () => '')
@@ -33,7 +34,7 @@ async function copy(address: string) {
 }
 
 function OneLink({ link, revoke }: { link: Link; revoke: Props['revoke'] }) {
-  const [state, send, isPending] = useActionState(() => revoke(link.id), QUIET)
+  const [state, send, isPending] = useActionState(() => revoke(link.id), UNTRIED)
   return (
     <li className="flex flex-wrap items-center justify-between gap-3 border-t border-rule py-2">
       <span>Made {dateText(link.createdAt)} by {link.createdBy}, opens until {dateText(link.expiresAt)}</span>
@@ -44,18 +45,19 @@ function OneLink({ link, revoke }: { link: Link; revoke: Props['revoke'] }) {
 }
 
 /** The client's way in: a new link is shown once, live ones can be revoked. */
-export function ClientLinks({ links, create, revoke }: Props) {
-  const [state, send, isPending] = useActionState(create, QUIET)
+export function ClientLinks({ links, days, create, revoke }: Props) {
+  const [state, send, isPending] = useActionState(create, UNTRIED)
   const origin = useOrigin()
-  const address = state.made ? `${origin}${state.made}` : null
+  // A link that was revoked meanwhile is not worth copying.
+  const address = state.made && links.some(({ id }) => id === state.id) ? `${origin}${state.made}` : null
   return (
     <section aria-labelledby="client-links" className="grid gap-3 border border-rule bg-sheet p-4">
       <h2 id="client-links" className="font-heading text-2xl">For the client</h2>
-      <p>A link opens the drawing of this project, without findings, notes or other projects. Whoever has it can look.</p>
+      <p>A link opens the drawing of this project, without findings, notes or other projects. Whoever has it can look, for {days} days or until it is revoked.</p>
       {state.error && <Notice tone="error">{state.error}</Notice>}
       {address && (
         <div className="flex flex-wrap items-end gap-3">
-          <TextField label="The new link" hint="Shown this once. Send it to the client." value={address} readOnly className="min-w-64 flex-1" onFocus={(event) => event.target.select()} />
+          <TextField label="The new link" hint={`Shown this once. It opens for ${days} days, as often as wanted.`} value={address} readOnly className="min-w-64 flex-1" onFocus={(event) => event.target.select()} />
           <Button onClick={() => void copy(address)} className="mb-7">Copy it</Button>
         </div>
       )}

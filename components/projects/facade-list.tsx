@@ -3,13 +3,15 @@ import { useActionState, useState } from 'react'
 import { FindingCounts } from '@/components/findings/finding-counts'
 import { Button, Dialog, LinkButton, Notice, TextField } from '@/components/ui'
 import type { FindingKind } from '@/lib/spacing'
-import type { SmallAction, SmallState } from './small-action'
+import { UNTRIED, type SmallAction, type SmallState } from './small-action'
+import { dateText } from './words'
 
 interface Facade {
   id: string
   name: string
   placements: number
   counts: Record<FindingKind, number>
+  updatedAt: number
 }
 
 export interface FacadeActions {
@@ -18,20 +20,27 @@ export interface FacadeActions {
   add: SmallAction
 }
 
+/** What this role may do with a facade. */
+export interface FacadeWays {
+  look: boolean
+  draw: boolean
+  list: boolean
+  /** Add, rename and remove. */
+  edit: boolean
+}
+
 interface Props {
   projectId: string
   facades: readonly Facade[]
-  canEdit: boolean
+  may: FacadeWays
   actions: FacadeActions
 }
 
-const QUIET: SmallState = { error: null, made: null }
-
 function Rename({ facade, rename }: { facade: Facade; rename: FacadeActions['rename'] }) {
-  const [state, send, isPending] = useActionState(rename.bind(null, facade.id), QUIET)
+  const [state, send, isPending] = useActionState(rename.bind(null, facade.id), UNTRIED)
   return (
-    <form action={send} className="flex flex-wrap items-end gap-2">
-      <TextField name="name" label="Name" defaultValue={facade.name} required maxLength={80} error={state.error} />
+    <form key={`${facade.name} ${state.typed?.name}`} action={send} className="flex flex-wrap items-end gap-2">
+      <TextField name="name" label="Name" defaultValue={state.typed?.name ?? facade.name} required maxLength={80} error={state.fields?.name ?? state.error} />
       <Button type="submit" disabled={isPending}>Rename</Button>
     </form>
   )
@@ -39,12 +48,12 @@ function Rename({ facade, rename }: { facade: Facade; rename: FacadeActions['ren
 
 function Remove({ facade, remove }: { facade: Facade; remove: FacadeActions['remove'] }) {
   const [isOpen, setOpen] = useState(false)
-  const [state, send, isPending] = useActionState(() => remove(facade.id), QUIET)
-  const what = facade.placements === 1 ? 'its one plant' : `its ${facade.placements} plants`
+  const [state, send, isPending] = useActionState(() => remove(facade.id), UNTRIED)
+  const plants = facade.placements === 0 ? 'Nothing is planted on it' : facade.placements === 1 ? 'Its one plant goes too' : `Its ${facade.placements} plants go too`
   return (
     <>
       <Button variant="danger" onClick={() => setOpen(true)}>Remove {facade.name}</Button>
-      <Dialog title={`Remove ${facade.name}?`} description={`Its measures and ${what} go with it. This cannot be undone.`} open={isOpen} onOpenChange={setOpen}>
+      <Dialog title={`Remove ${facade.name}?`} description={`Its measures, windows, walks and beds go with it. ${plants}. This cannot be undone.`} open={isOpen} onOpenChange={setOpen}>
         {state.error && <Notice tone="error">{state.error}</Notice>}
         <form action={send} className="mt-4 flex flex-wrap gap-3">
           <Button type="submit" variant="danger" disabled={isPending}>Remove it</Button>
@@ -55,19 +64,19 @@ function Remove({ facade, remove }: { facade: Facade; remove: FacadeActions['rem
   )
 }
 
-function OneFacade({ facade, projectId, canEdit, actions }: { facade: Facade } & Omit<Props, 'facades'>) {
+function OneFacade({ facade, projectId, may, actions }: { facade: Facade } & Omit<Props, 'facades'>) {
   const path = `/projects/${projectId}/facades/${facade.id}`
   return (
     <li className="grid gap-3 border border-rule bg-sheet p-4">
       <h3 className="font-heading text-xl">{facade.name}</h3>
       <FindingCounts counts={facade.counts} />
-      <p className="text-ink-soft">{facade.placements === 0 ? 'Nothing planted yet' : facade.placements === 1 ? 'One plant' : `${facade.placements} plants`}</p>
+      <p className="text-ink-soft">{facade.placements === 0 ? 'Nothing planted yet' : facade.placements === 1 ? 'One plant' : `${facade.placements} plants`}. Changed {dateText(facade.updatedAt)}.</p>
       <div className="flex flex-wrap gap-3">
-        <LinkButton href={path} variant="primary" aria-label={`Drawing table of ${facade.name}`}>Drawing table</LinkButton>
-        <LinkButton href={`${path}/measure`} aria-label={`Measure ${facade.name}`}>Measure</LinkButton>
-        <LinkButton href={`${path}/plant-list`} aria-label={`Plant list of ${facade.name}`}>Plant list</LinkButton>
+        {may.look && <LinkButton href={path} variant="primary" aria-label={`${may.draw ? 'Draw' : 'Look at'} ${facade.name}`}>{may.draw ? 'Draw' : 'Look'}</LinkButton>}
+        {may.look && <LinkButton href={`${path}/measure`} aria-label={`${may.draw ? 'Measure' : 'Measures of'} ${facade.name}`}>{may.draw ? 'Measure' : 'Measures'}</LinkButton>}
+        {may.list && <LinkButton href={`${path}/plant-list`} aria-label={`Plant list of ${facade.name}`}>Plant list</LinkButton>}
       </div>
-      {canEdit && (
+      {may.edit && (
         <details>
           <summary className="flex min-h-11 cursor-pointer items-center underline decoration-rule underline-offset-4">Rename or remove</summary>
           <div className="flex flex-wrap items-end gap-3 pt-2"><Rename facade={facade} rename={actions.rename} /><Remove facade={facade} remove={actions.remove} /></div>
@@ -77,21 +86,32 @@ function OneFacade({ facade, projectId, canEdit, actions }: { facade: Facade } &
   )
 }
 
+function Add({ add }: { add: SmallAction }) {
+  const [{ typed = {}, fields = {}, error }, send, isPending] = useActionState(add, UNTRIED)
+  const line = (name: string) => ({ name, defaultValue: typed[name] ?? '', error: fields[name], required: true, autoComplete: 'off' })
+  return (
+    // The key starts the fields anew with what was typed.
+    <form key={JSON.stringify(typed)} action={send} className="grid gap-4 border border-dashed border-ink-soft p-4">
+      {error && <Notice tone="error">{error}</Notice>}
+      <div className="grid items-start gap-4 md:grid-cols-3">
+        <TextField label="New facade" hint="Such as front, or garden side" maxLength={80} {...line('name')} />
+        <TextField label="Wall from corner to corner" hint={'Such as 40 ft or 38\'-6"'} {...line('width')} />
+        <TextField label="Gutter above the soil" hint={'Such as 9 ft or 8\'-10"'} {...line('gutter')} />
+      </div>
+      <Button type="submit" disabled={isPending} className="justify-self-start">{isPending ? 'Adding' : 'Add the facade'}</Button>
+    </form>
+  )
+}
+
 /** The facades of a project, with the ways into each; editors add, rename and remove them. */
 export function FacadeList(props: Props) {
-  const [state, send, isPending] = useActionState(props.actions.add, QUIET)
+  const { facades, may, actions } = props
   return (
     <section aria-labelledby="facades" className="grid gap-4">
       <h2 id="facades" className="font-heading text-2xl">Facades</h2>
-      {props.facades.length === 0 && <p>A facade is one measured side of the house. {props.canEdit ? 'Add the first one below.' : 'None is drawn yet.'}</p>}
-      <ul className="grid gap-4 lg:grid-cols-2">{props.facades.map((facade) => <OneFacade key={facade.id} {...props} facade={facade} />)}</ul>
-      {props.canEdit && (
-        <form action={send} className="flex flex-wrap items-end gap-3 border border-dashed border-ink-soft p-4">
-          <TextField name="name" label="New facade" placeholder="Front" required maxLength={80} />
-          <TextField name="width" label="Wall from corner to corner" placeholder="40 ft" required error={state.error} />
-          <Button type="submit" disabled={isPending}>Add the facade</Button>
-        </form>
-      )}
+      {facades.length === 0 && <p>A facade is one measured side of the house. {may.edit ? 'Add the first one below.' : 'None is drawn yet.'}</p>}
+      <ul className="grid gap-4 lg:grid-cols-2">{facades.map((facade) => <OneFacade key={facade.id} {...props} facade={facade} />)}</ul>
+      {may.edit && <Add add={actions.add} />}
     </section>
   )
 }

@@ -1,16 +1,17 @@
 'use client'
-import { useActionState, type ReactNode } from 'react'
+import { useActionState, useState, type ReactNode } from 'react'
 import { Button, CheckboxField, Notice, SelectField, TextAreaField, TextField } from '@/components/ui'
 import type { ProjectInput } from '@/lib/project'
 import { AIMS } from '@/lib/spacing'
 import { AIM_WORDS, DEER, MOISTURE, WALNUT } from './words'
 
-/** What the form shows after an attempt. What was typed is given back, so that nothing is lost. */
+/** What the form shows after an attempt. What was typed is given back, so that nothing is lost. `version`: to be sent next. */
 export interface ProjectFormState {
   isSaved: boolean
   error: string | null
   fields: Record<string, string>
   typed: Record<string, string | string[]> | null
+  version?: number
 }
 
 interface Props {
@@ -34,9 +35,11 @@ function Group({ title, children }: { title: string; children: ReactNode }) {
 
 /** A project's form: who and where, the facts of its site, what is wished for, and words for the studio alone. */
 export function ProjectForm({ action, project, version, submit }: Props) {
+  // The version the form was opened with stays its own: a later one would let it overwrite what its writer never saw.
+  const [opened] = useState(version)
   const [state, send, isPending] = useActionState(action, UNTRIED)
   const start = { ...EMPTY, ...project }
-  const { typed, fields } = state
+  const { typed, fields, version: held = opened } = state
   const text = (name: string) => String(typed?.[name] ?? (start as Record<string, unknown>)[name] ?? '')
   const line = (name: string) => ({ name, defaultValue: text(name), error: fields[name] })
   const brief: readonly string[] = typed ? [typed.brief ?? []].flat() : (start.brief ?? [])
@@ -44,7 +47,7 @@ export function ProjectForm({ action, project, version, submit }: Props) {
   return (
     // The key starts the fields anew with what was typed: React clears a form after its action.
     <form key={JSON.stringify(typed)} action={send} className="grid max-w-3xl gap-8">
-      {version !== undefined && <input type="hidden" name="version" value={version} />}
+      {held !== undefined && <input key={held} type="hidden" name="version" defaultValue={held} />}
       {state.error && <Notice tone="error">{state.error}</Notice>}
       {state.isSaved && <Notice tone="good">Saved. Every facade was checked again.</Notice>}
       <Group title="The commission">
@@ -54,7 +57,7 @@ export function ProjectForm({ action, project, version, submit }: Props) {
       </Group>
       <Group title="The site">
         <TextField label="Hardiness zone" hint="1a to 13b, such as 6b" required maxLength={3} {...line('zone')} />
-        <SelectField label="Soil" options={MOISTURE} {...line('moisture')} />
+        <SelectField label="Soil moisture" options={MOISTURE} {...line('moisture')} />
         <SelectField label="Deer" options={DEER} {...line('deer')} />
         <SelectField label="Black walnut" options={WALNUT} {...line('walnut')} />
         <TextField label="Latitude" hint="Degrees, north is positive; may stay empty" inputMode="decimal" {...line('latitude')} />
