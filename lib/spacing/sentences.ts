@@ -1,5 +1,6 @@
 /** All that the check says, in plain sentences made from its data. No sentence stands anywhere else. */
 import { formatLength } from '../measure'
+import { CONTACT } from './geometry/contact'
 import type { Finding, Inches, Sheet, Year, YearRange } from './types'
 
 export interface Description {
@@ -68,8 +69,16 @@ function expectedKeeps({ kind, limit, measured }: Finding, below: string): strin
 /** Held findings say what holds them, and what happens once nobody clips. */
 const held = (fits: string, unclipped: string, finding: Finding) => `${fits} only while kept clipped. Left alone it ${unclipped}${when(finding)}.`
 
-const saySill: Say = (finding, names) => {
-  const limit = `the sill of ${names.feature(finding.feature)}`
+/** The line a crown may not pass: the sill, or as far below it as the studio keeps free. */
+function sillLine({ feature, limit }: Finding, names: Names, { openings }: Sheet): string {
+  const sill = `the sill of ${names.feature(feature)}`
+  const window = openings.find(({ id }) => id === feature)
+  const margin = window && limit !== null ? window.sill - limit : 0
+  return margin > CONTACT ? `the line ${lengthText(margin)} below ${sill}` : sill
+}
+
+const saySill: Say = (finding, names, sheet) => {
+  const limit = sillLine(finding, names, sheet)
   if (finding.kind === 'held') return held(`Stays below ${limit}`, `goes ${by(finding)} past it`, finding)
   if (finding.kind === 'note') return `Stands well out from the wall, yet goes ${by(finding)} past ${limit}${when(finding)}.`
   return `${atLargest(finding)}goes ${by(finding)} past ${limit}${when(finding)}.${expectedKeeps(finding, 'below it')}`
@@ -87,19 +96,26 @@ const sayByDistance = (finding: Finding, clear: string, reaches: string): string
   return `${atLargest(finding)}${reaches}${when(finding)}.`
 }
 
+/** Where a studio keeps no gap, the crown may touch the wall and no more. */
+function sayTouch(finding: Finding): string {
+  if (finding.kind === 'note') return `Grows against the wall, but stays below the siding${when(finding)}.`
+  return sayByDistance(finding, 'Keeps off the wall', `presses ${by(finding)} into the wall`)
+}
+
 const SAY: Record<string, Say> = {
   sill: saySill,
   gutter: sayGutter,
   'walk-edge': (finding, names) => {
     const walk = names.feature(finding.feature)
     if (finding.year?.latest === 0 && (finding.measured?.low ?? 0) < 0 && finding.excess > 0 && finding.kind === 'conflict') {
-      return `Stands in or over ${walk} from the day it is planted, ${by(finding)} past its edge when grown.`
+      return `Stands in or over ${walk} from the day it is planted, ${lengthText(finding.excess - (finding.limit ?? 0))} past its edge when grown.`
     }
     const limit = finding.limit ? `comes ${by(finding)} into the ${lengthText(finding.limit)} kept clear beside ${walk}` : `leans ${by(finding)} over ${walk}`
     return sayByDistance(finding, `Clears ${walk}`, limit)
   },
   'wall-gap': (finding) => {
-    const gap = lengthText(finding.limit ?? 0)
+    if (!finding.limit) return sayTouch(finding)
+    const gap = lengthText(finding.limit)
     if (finding.kind === 'note') return `Comes within ${gap} of the wall, but stays below the siding${when(finding)}.`
     return sayByDistance(finding, `Keeps ${gap} off the wall`, `comes ${by(finding)} into the ${gap} kept free in front of the wall`)
   },
@@ -113,8 +129,10 @@ const SAY: Record<string, Say> = {
   },
   'layer-order': (finding, names) => {
     const behind = names.plant(finding.placements[1])
-    const rises = `rises ${by(finding)} above ${behind} behind it`
-    if (finding.kind === 'held') return held(`Stays below ${behind} behind it`, `rises ${by(finding)} above it`, finding)
+    // The rise is told whole, not what is left of it above the rise a studio allows.
+    const rise = lengthText(finding.excess + (finding.limit ?? 0))
+    const rises = `rises ${rise} above ${behind} behind it`
+    if (finding.kind === 'held') return held(finding.limit ? `Keeps its place before ${behind}` : `Stays below ${behind} behind it`, `rises ${rise} above it`, finding)
     if (finding.kind === 'note') return `A specimen: it ${rises}${when(finding)}.`
     return `${atLargest(finding)}${rises}${when(finding)}.`
   },
