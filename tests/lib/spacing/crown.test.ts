@@ -19,7 +19,7 @@ describe('a crown of any habit, cut or not', () => {
     fc.assert(fc.property(anyCrown, (crown) => {
       expect(crownVolume(crown) / sum(crown, (r) => Math.PI * r * r)).toBeCloseTo(1, 3)
       expect(silhouetteArea(crown) / sum(crown, (r) => 2 * r)).toBeCloseTo(1, 3)
-    }), { numRuns: 80 })
+    }), { seed: 10, numRuns: 80 })
   })
 
   test('reaches as far as the widest of its levels, and spans where it is that wide', () => {
@@ -34,7 +34,7 @@ describe('a crown of any habit, cut or not', () => {
         if (z > part.from + 1e-6 && z < part.to - 1e-6) expect(radiusAt(crown, z)).toBeGreaterThanOrEqual(d - 1e-6)
         if (z < part.from - 1e-6 || z > part.to + 1e-6) expect(radiusAt(crown, z)).toBeLessThanOrEqual(d + 1e-6)
       }
-    }), { numRuns: 80 })
+    }), { seed: 10, numRuns: 80 })
   })
 
   test('overlaps another by the largest sum of radii on shared levels', () => {
@@ -51,7 +51,7 @@ describe('a crown of any habit, cut or not', () => {
       expect(overlap!).toBeGreaterThanOrEqual(most - 1e-6)
       expect(overlap! - most).toBeLessThan(0.5)
       expect(overlapOf(b, a, 7)).toBeCloseTo(overlap!, 6)
-    }), { numRuns: 150 })
+    }), { seed: 10, numRuns: 150 })
   })
 })
 

@@ -34,4 +34,31 @@ describe('layer-order', () => {
     expect(layers(80, { front: { clearStem: 36 } })).toEqual([])
     expect(layers(80, { front: { clearStem: 35.9 } })).toHaveLength(1)
   })
+  test('the rise allowed by a studio counts, on both sides of it', () => {
+    const sheet = { standards: { 'layer-order.tolerance': 6 } }
+    expect(layers(42, { sheet })).toEqual([])
+    expect(layers(42.02, { sheet })[0]).toMatchObject({ kind: 'conflict', limit: 6 })
+  })
+  test('a grass is a risk at most too, but held as any', () => {
+    expect(layers(50, { plant: { category: 'grass' } })[0]?.kind).toBe('risk')
+    expect(layers(50, { plant: { category: 'perennial' }, front: { kept: { height: 30 } } })[0]?.kind).toBe('held')
+  })
+  test('one kind of plant, annuals and bulbs, plants on the wall and two that stay are not judged', () => {
+    expect(layers(50, { behind: { plant: 'p1', planted: { height: 30, spread: 40 } } })).toEqual([])
+    expect(layers(50, { plant: { category: 'annual' } })).toEqual([])
+    expect(layers(50, { plant: { category: 'bulb' } })).toEqual([])
+    expect(layers(50, { behind: { role: 'on-wall' } })).toEqual([])
+    expect(layers(50, { front: { status: 'stays' }, behind: { status: 'stays' } })).toEqual([])
+    expect(layers(50, { front: { status: 'stays' } })).toHaveLength(1)
+    expect(layers(50, { front: { status: 'goes' } })).toEqual([])
+  })
+  test('soil counts: on ground that falls the front may be so much taller', () => {
+    const facade = { ...makeSheet().facade, fall: 0.1 }
+    expect(layers(41, { sheet: { facade } })).toEqual([])
+    expect(layers(41.02, { sheet: { facade } })).toHaveLength(1)
+  })
+  test('a plant behind that is clipped below the front makes it rise', () => {
+    expect(layers(30, { behind: { kept: { height: 20 } } })[0]).toMatchObject({ kind: 'conflict', excess: 10 })
+  })
+  test('kept narrow it laps nothing', () => expect(layers(50, { front: { x: 268, kept: { spread: 10 } } })).toEqual([]))
 })

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest'
-import type { Light } from '@/lib/plants/types'
+import { LIGHTS, type Light } from '@/lib/plants/types'
 import { found, makePlacement, makePlant, makeSheet } from '../../../support/sheets'
 
 const lit = (light: Light[], standards = {}, status: 'new' | 'stays' = 'new') => found(makeSheet({ standards, plants: [makePlant({ light })], placements: [makePlacement({ status })] }), 'light')
@@ -14,4 +14,13 @@ test('light: unknown light and plants that stay are not judged; a studio may mak
   expect(lit(['part-shade'], {}, 'stays')).toEqual([])
   expect(lit(['part-shade'], { 'light.kind': 'note' })[0]?.kind).toBe('note')
   expect(lit(['part-shade'], { 'light.kind': 'off' })).toEqual([])
+})
+
+test('light: each class of a front passes a plant listed for it, and none other', () => {
+  for (const here of LIGHTS) {
+    for (const wanted of LIGHTS) {
+      const sheet = makeSheet({ plants: [makePlant({ light: [wanted] })], placements: [makePlacement({ id: 'b' }), makePlacement({ id: 'a' }), makePlacement({ id: 'c', status: 'goes' })] })
+      expect(found({ ...sheet, site: { ...sheet.site, light: here } }, 'light').map(({ placements }) => placements)).toEqual(here === wanted ? [] : [['a', 'b']])
+    }
+  }
 })

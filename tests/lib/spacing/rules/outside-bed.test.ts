@@ -18,4 +18,11 @@ describe('outside-bed', () => {
     expect(at(120, {}, { standards: { 'outside-bed.kind': 'risk' } })[0]?.kind).toBe('risk')
     expect(at(120, {}, { standards: { 'outside-bed.kind': 'off' } })).toEqual([])
   })
+  test('two beds that meet leave no gap; of several the nearest counts', () => {
+    const two = (from: number) => ({ beds: [{ ...beds[0], outline: rectangle(0, 240, 0, 96) }, { id: 'b2', name: 'Right', outline: rectangle(from, 480, 0, 96) }] })
+    expect(at(50, { x: 240 }, two(240))).toEqual([])
+    expect(at(50, { x: 250 }, two(280))[0]?.excess).toBe(10)
+    expect(at(50, { x: 275 }, two(280))[0]?.excess).toBe(5)
+  })
+  test('a plant that goes is ignored', () => expect(at(120, { status: 'goes' })).toEqual([]))
 })
