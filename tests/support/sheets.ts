@@ -1,7 +1,7 @@
 /** Sheets for tests of the check: a level, plain house front on which one thing at a time is wrong. Inches. */
 import fc from 'fast-check'
 import { check, type Finding, type Opening, type Placement, type Point, type Sheet, type Walk } from '@/lib/spacing'
-import { CATEGORIES, GROWTHS, HABITS, LEAVES, type Plant } from '@/lib/plants/types'
+import { CATEGORIES, GROWTHS, HABITS, LEAVES, LIGHTS, type Plant } from '@/lib/plants/types'
 
 export function makePlant(changes: Partial<Plant> = {}): Plant {
   return {
@@ -42,7 +42,7 @@ const part = (low: number, high: number) => fc.integer({ min: low * 64, max: hig
 
 const anyPlant = (id: string) => fc.record({
   category: fc.constantFrom(...CATEGORIES), leaf: fc.constantFrom(...LEAVES), habit: fc.constantFrom(...HABITS), growth: fc.constantFrom(...GROWTHS),
-  height: part(8, 90), spread: part(8, 90), more: part(0, 60), zoneMin: fc.integer({ min: 1, max: 7 }),
+  height: part(8, 90), spread: part(8, 90), more: part(0, 60), zoneMin: fc.integer({ min: 1, max: 7 }), light: fc.subarray([...LIGHTS]),
 }).map(({ height, spread, more, ...rest }) => makePlant({ ...rest, id, heightMin: height, heightMax: height + more, spreadMin: spread, spreadMax: spread + more }))
 
 const anyPlacement = (id: string) => fc.record({
@@ -50,7 +50,8 @@ const anyPlacement = (id: string) => fc.record({
   role: fc.constantFrom('shrub' as const, 'shrub' as const, 'specimen' as const, 'hedge' as const, 'on-wall' as const),
   status: fc.constantFrom('new' as const, 'new' as const, 'stays' as const, 'goes' as const),
   kept: fc.option(fc.record({ height: part(8, 50), spread: part(8, 50) }), { nil: undefined }), drift: fc.option(fc.constantFrom('d1', 'd2'), { nil: undefined }),
-}).map(({ kept, drift, ...rest }): Placement => ({ id, ...rest, ...(kept && { kept }), ...(drift && { drift }) }))
+  clearStem: fc.option(part(0, 60), { nil: undefined }),
+}).map(({ kept, drift, clearStem, ...rest }): Placement => ({ id, ...rest, ...(kept && { kept }), ...(drift && { drift }), ...(clearStem !== undefined && { clearStem }) }))
 
 /** Any front with a jog, soil that falls, windows, walks, two beds and up to nine plants. */
 export const anySheet: fc.Arbitrary<Sheet> = fc.tuple(anyPlant('p1'), anyPlant('p2'), anyPlant('p3'), fc.integer({ min: 1, max: 9 }), part(-30, 30))

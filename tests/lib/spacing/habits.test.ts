@@ -1,9 +1,9 @@
 /** The twelve habits by their table: how wide at the foot, where widest, and the way back from a radius to its heights. */
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import { crownOf, radiusAt, reach, silhouette, span, type Crown } from '@/lib/spacing'
+import { crownOf, radiusAt, reach, silhouette, span, type Crown, type When } from '@/lib/spacing'
 import { makeCrown } from '@/lib/spacing/crown'
-import { HABITS, type Habit } from '@/lib/plants/types'
+import { HABITS, type Category, type Habit } from '@/lib/plants/types'
 import { makePlacement, makePlant, makeSheet } from '../../support/sheets'
 
 /** Share of the half spread at the foot, share of the height where it is widest, exponents above. */
@@ -79,7 +79,7 @@ describe('contacts of a hundredth', () => {
 })
 
 describe('the clear stem', () => {
-  const stem = (habit: Habit, height: number, changes = {}, year: number | 'mature' = 'mature', category: 'tree' | 'shrub' = 'tree') => crownOf({
+  const stem = (habit: Habit, height: number, changes = {}, { year = 'mature', category = 'tree' }: { year?: When; category?: Category } = {}) => crownOf({
     plant: makePlant({ category, habit, heightMin: height, heightMax: height }), placement: makePlacement(changes),
     facade: makeSheet().facade, zone: '6a', bound: 'expected', year,
   }).clearStem
@@ -87,13 +87,13 @@ describe('the clear stem', () => {
   test('of a tree from 180 in up is 0.15 of its height at any age', () => {
     expect(stem('rounded', 180)).toBeCloseTo(27, 9)
     expect(stem('rounded', 179.9)).toBe(0)
-    expect(stem('rounded', 180, {}, 0)).toBeCloseTo(1.8, 9)
+    expect(stem('rounded', 180, {}, { year: 0 })).toBeCloseTo(1.8, 9)
   })
   test.each(['pyramidal', 'columnar', 'weeping', 'multi-stem'] as const)('of a %s tree is none', (habit) => expect(stem(habit, 300)).toBe(0))
-  test('of a shrub is none', () => expect(stem('rounded', 300, {}, 'mature', 'shrub')).toBe(0))
+  test('of a shrub is none', () => expect(stem('rounded', 300, {}, { category: 'shrub' })).toBe(0))
   test('as set is in inches, none too, and at most 0.6 of the height at that age', () => {
     expect(stem('rounded', 300, { clearStem: 84 })).toBe(84)
     expect(stem('rounded', 300, { clearStem: 0 })).toBe(0)
-    expect(stem('rounded', 300, { clearStem: 84 }, 0)).toBeCloseTo(7.2, 9)
+    expect(stem('rounded', 300, { clearStem: 84 }, { year: 0 })).toBeCloseTo(7.2, 9)
   })
 })

@@ -22,5 +22,5 @@ test('every finding has a title and a whole sentence without holes', () => {
       expect(sentence).toMatch(/^[A-Z].*\.$/)
       expect(sentence).not.toMatch(/null|undefined|NaN|Infinity/)
     }
-  }), { numRuns: 40 })
+  }), { seed: 13, numRuns: 40 })
 })
