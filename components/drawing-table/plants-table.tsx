@@ -1,5 +1,6 @@
 'use client'
 /** Every placement of the drawing in numbers: the same ones, and every one of them can be changed here. */
+import { WideTable } from '@/components/ui'
 import { plantKeys } from '@/lib/sheet'
 import { wallDistance, type Placement, type Sheet } from '@/lib/spacing'
 import { alongWall, outFromWall } from './editor'
@@ -55,7 +56,7 @@ export function PlantsTable() {
   return (
     <div className="p-3">
       {editor.canEdit ? <button type="button" onClick={page.openPlants} className={`${STRONG} mb-3`}>Add a plant</button> : null}
-      <div className="overflow-x-auto">
+      <WideTable label="The plants of the drawing in numbers">
         <table id="plants-table" data-testid="plants-table" className="w-full text-[15px] [&_td]:py-1 [&_td]:pr-1 [&_thead_th]:pr-2 [&_thead_th]:pb-1 [&_thead_th]:text-left [&_thead_th]:align-bottom [&_thead_th]:text-sm">
           <caption className="pb-2 text-left text-ink-soft">{rows.length === 1 ? 'One plant' : `${rows.length} plants`}, from the left corner to the right.</caption>
           <thead>
@@ -70,7 +71,7 @@ export function PlantsTable() {
             ))}
           </tbody>
         </table>
-      </div>
+      </WideTable>
     </div>
   )
 }

@@ -1,3 +1,4 @@
+import { WideTable } from '@/components/ui'
 import { rangeText } from '@/lib/plants'
 import { BotanicalName } from './botanical-name'
 import type { LineProblem, Preview } from './import-calls'
@@ -55,7 +56,7 @@ export function GoodTable({ good, notes }: Pick<Preview, 'good' | 'notes'>) {
   return (
     <section className={CARD} aria-label="Plants that can come in">
       <h2 className={HEADING}>Plants that can come in</h2>
-      <div className="overflow-x-auto" role="region" aria-label="Plants that can come in, as a table" tabIndex={0}>
+      <WideTable label="Plants that can come in, as a table">
         <table className="mt-2 w-full min-w-160 border-collapse text-left">
           <thead>
             <tr className="border-b border-ink-soft">
@@ -74,7 +75,7 @@ export function GoodTable({ good, notes }: Pick<Preview, 'good' | 'notes'>) {
             ))}
           </tbody>
         </table>
-      </div>
+      </WideTable>
       <Rest count={good.length - SHOWN} />
     </section>
   )

@@ -1,3 +1,4 @@
+import { WideTable } from '@/components/ui'
 import { monthName, type LibraryPlant } from '@/lib/plants'
 
 const MONTHS = Array.from({ length: 12 }, (_, i) => i + 1)
@@ -33,7 +34,7 @@ function bandsOf({ bloomMonths, bloomColor, fruitMonths, fruitColor, fallColor }
 /** The year in twelve cells: when it flowers, fruits and turns. Every filled cell says so in words too. */
 export function MonthsStrip({ plant }: { plant: LibraryPlant }) {
   return (
-    <div className="overflow-x-auto">
+    <WideTable label="Months of flower, fruit and fall color">
       <table className="w-full min-w-136 table-fixed border-collapse text-center">
         <caption className="sr-only">Months of flower, fruit and fall color</caption>
         <thead>
@@ -61,6 +62,6 @@ export function MonthsStrip({ plant }: { plant: LibraryPlant }) {
         </tbody>
       </table>
       {plant.fallColor !== 'none' && <p className="mt-2 text-sm text-ink-soft">Fall color is drawn in October and November; the weeks differ by place and year.</p>}
-    </div>
+    </WideTable>
   )
 }

@@ -1,5 +1,6 @@
 'use client'
 /** The library as a table. Order and pages are the server's: headings are links. */
+import { WideTable } from '@/components/ui'
 import { createColumnHelper, rowSortingFeature, tableFeatures, useTable } from '@tanstack/react-table'
 import type { Route } from 'next'
 import Link from 'next/link'
@@ -62,7 +63,7 @@ export function PlantTable({ plants, query, caption }: { plants: LibraryPlant[];
   const sorting = query.sort === 'match' ? [] : [{ id: query.sort, desc: query.direction === 'desc' }]
   const table = useTable({ features, columns, data: plants, getRowId: (plant) => plant.id, manualSorting: true, state: { sorting } })
   return (
-    <div className="overflow-x-auto rounded-sm border border-rule bg-sheet" role="region" aria-label={caption} tabIndex={0}>
+    <WideTable label={caption} className="rounded-sm border border-rule bg-sheet">
       <table className="w-full min-w-240 border-collapse text-left">
         <caption className="sr-only">{caption}</caption>
         <thead>
@@ -92,6 +93,6 @@ export function PlantTable({ plants, query, caption }: { plants: LibraryPlant[];
           ))}
         </tbody>
       </table>
-    </div>
+    </WideTable>
   )
 }

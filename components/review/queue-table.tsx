@@ -1,6 +1,6 @@
 import { FindingCounts } from '@/components/findings/finding-counts'
 import { dateText } from '@/components/projects/words'
-import { LinkButton } from '@/components/ui'
+import { LinkButton, WideTable } from '@/components/ui'
 import { STAGE_WORDS, type Stage } from '@/lib/project'
 import type { FindingKind } from '@/lib/spacing'
 
@@ -18,7 +18,7 @@ interface Item {
 /** The facades that want a second look, each with the way to its drawing. */
 export function QueueTable({ items }: { items: readonly Item[] }) {
   return (
-    <div className="overflow-x-auto border border-rule bg-sheet" role="region" aria-label="Facades to review" tabIndex={0}>
+    <WideTable label="Facades to review" className="border border-rule bg-sheet">
       <table className="w-full border-collapse">
         <thead>
           <tr>{['Project', 'Facade', 'Stage', 'Findings', 'Plants', 'Changed', ''].map((head) => <th key={head} scope="col" className="px-3 py-2 text-left">{head || <span className="sr-only">Drawing</span>}</th>)}</tr>
@@ -37,6 +37,6 @@ export function QueueTable({ items }: { items: readonly Item[] }) {
           ))}
         </tbody>
       </table>
-    </div>
+    </WideTable>
   )
 }

@@ -1,3 +1,4 @@
+import { WideTable } from '@/components/ui'
 import { BotanicalName } from '@/components/plants/botanical-name'
 import { formatLength } from '@/lib/measure'
 import type { PlantListRow } from '@/lib/takeoff'
@@ -25,7 +26,7 @@ function Row({ row }: { row: PlantListRow }) {
 /** The plant list with its total. */
 export function PlantListTable({ rows, total }: { rows: readonly PlantListRow[]; total: number }) {
   return (
-    <div className="overflow-x-auto border border-rule bg-sheet print:overflow-visible print:border-0" role="region" aria-label="Plant list" tabIndex={0}>
+    <WideTable label="Plant list" className="border border-rule bg-sheet print:overflow-visible print:border-0">
       <table className="w-full border-collapse">
         <thead>
           <tr>{HEADS.map((head) => <th key={head} scope="col" className={`px-3 py-2 ${head === 'Quantity' ? 'text-right' : 'text-left'}`}>{head}</th>)}</tr>
@@ -39,6 +40,6 @@ export function PlantListTable({ rows, total }: { rows: readonly PlantListRow[];
           </tr>
         </tfoot>
       </table>
-    </div>
+    </WideTable>
   )
 }

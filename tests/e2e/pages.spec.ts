@@ -1,26 +1,9 @@
 /** Every page, for everyone: who sees it, who is told that there is nothing, who is sent elsewhere. */
-import { expect, test, type Browser, type BrowserContext } from '@playwright/test'
+import { expect, test, type BrowserContext } from '@playwright/test'
 import { PAGES, VIEWERS, type Viewer } from '../support/endpoints'
-import { EMAILS, facadeOf, makeClientLink, ownPlantId, signIn } from './support/demo'
+import { contextFor, ids } from './support/viewers'
 
 const contexts = new Map<Viewer, BrowserContext>()
-
-async function contextFor(browser: Browser, viewer: Viewer): Promise<BrowserContext> {
-  const context = await browser.newContext({ viewport: { width: 1440, height: 900 } })
-  const page = await context.newPage()
-  if (viewer in EMAILS) await signIn(page, viewer as keyof typeof EMAILS)
-  if (viewer === 'client' || viewer === 'otherClient') {
-    const maker = await (await browser.newContext()).newPage()
-    await page.goto(await makeClientLink(maker, viewer === 'client' ? 'Kiln Lane' : 'Perry Road'))
-    await page.getByRole('button').first().click()
-    await page.waitForURL('**/view')
-    await maker.context().close()
-  }
-  await page.close()
-  return context
-}
-
-const ids = () => ({ ...facadeOf('Kiln Lane'), plantId: ownPlantId() })
 
 test.describe.configure({ mode: 'serial' })
 

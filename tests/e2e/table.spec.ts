@@ -1,6 +1,7 @@
-/** The drawing table at a laptop: findings, read-only looking, moving by keys and undo, against the database. */
+/** The drawing table at a laptop: place, move, undo, reload; what the page calls saved stands in the database. */
 import { expect, test } from '@playwright/test'
-import { placementsOf, signIn, tablePath } from './support/demo'
+import { facadeOf, placementsOf, signIn, tablePath, watchConsole } from './support/demo'
+import { spotsOn } from './support/spots'
 
 test('selecting a finding selects its plant', async ({ page }) => {
   await signIn(page, 'designer')
@@ -41,4 +42,77 @@ test('a dragged plant stays where it was dropped, and its numbers say so', async
   await expect.poll(() => placementsOf('Quarry Cottage').filter((one, i) => one.x !== before[i]!.x).length).toBe(1)
   await page.getByRole('button', { name: /^Undo/ }).click()
   await expect.poll(() => placementsOf('Quarry Cottage')).toEqual(before)
+})
+
+const SAVED = /^Saved/
+
+test('a plant is found, placed by numbers, changed in the table, undone, kept and removed', async ({ page }) => {
+  const complaints = watchConsole(page)
+  await signIn(page, 'designer')
+  await page.goto(tablePath('Perry Road'))
+  await page.getByRole('tab', { name: /Plants/ }).click()
+  await page.getByRole('button', { name: 'Add a plant' }).click()
+  const picker = page.getByTestId('plant-picker')
+  await picker.getByRole('searchbox').fill('ilex gla')
+  await picker.getByRole('button', { name: /Ilex glabra/ }).first().click()
+  await picker.getByLabel('Along the wall').fill(`6'-0"`)
+  await picker.getByLabel('From the wall').fill('4 ft')
+  await picker.getByRole('button', { name: 'Plant it here' }).click()
+  await expect(page.getByTestId('save-state')).toContainText(SAVED)
+  expect(placementsOf('Perry Road')).toMatchObject([{ x: 72, y: 48 }])
+  await picker.getByRole('button', { name: 'Done' }).click()
+
+  // In the table beside the drawing: the same numbers, and the same powers.
+  await page.getByRole('tab', { name: /Plants/ }).click()
+  const table = page.getByTestId('plants-table')
+  const along = table.getByRole('textbox', { name: /along the wall/ })
+  await expect(along).toHaveValue(`6'-0"`)
+  await expect(table.getByRole('textbox', { name: /from the wall/ })).toHaveValue(`4'-0"`)
+  await along.fill('193 cm')
+  await along.press('Enter')
+  await expect.poll(() => placementsOf('Perry Road')[0]!.x).toBeCloseTo(193 / 2.54, 1)
+  await page.getByRole('button', { name: /^Undo/ }).click()
+  await expect.poll(() => placementsOf('Perry Road')[0]!.x).toBe(72)
+  await page.getByRole('button', { name: /^Redo/ }).click()
+  await expect.poll(() => placementsOf('Perry Road')[0]!.x).toBeCloseTo(193 / 2.54, 1)
+
+  // A length that is none: a sentence, and the plant stays where it is.
+  await along.fill('six')
+  await along.press('Enter')
+  await expect(table.getByText(/length/i).first()).toBeVisible()
+  expect(placementsOf('Perry Road')[0]!.x).toBeCloseTo(193 / 2.54, 1)
+
+  await page.reload()
+  await page.getByRole('tab', { name: /Plants/ }).click()
+  await expect(page.getByTestId('plants-table').locator('tbody tr')).toHaveCount(1)
+  await page.getByRole('button', { name: /^Remove/ }).first().click()
+  await expect.poll(() => placementsOf('Perry Road')).toEqual([])
+  expect(complaints).toEqual([])
+})
+
+test('a mouse drags a plant, the wheel and the buttons come nearer and go back', async ({ page }) => {
+  await signIn(page, 'designer')
+  await page.goto(tablePath('Quarry Cottage'))
+  await expect(page.getByTestId('drawing-table').locator('canvas').first()).toBeVisible()
+  await page.waitForTimeout(500)
+  const spots = await spotsOn(page, facadeOf('Quarry Cottage').facadeId)
+  const before = placementsOf('Quarry Cottage')
+  const one = before[0]!
+  const from = spots.inPlan(one.x, one.y)
+  await page.mouse.move(from.x, from.y)
+  await page.mouse.down()
+  await page.mouse.move(from.x + 12 * spots.scale, from.y, { steps: 6 })
+  await page.mouse.up()
+  await expect.poll(() => placementsOf('Quarry Cottage')[0]!.x).toBeCloseTo(one.x + 12, 0)
+  // Escape during a drag puts it back.
+  await page.mouse.down()
+  await page.mouse.move(from.x + 40 * spots.scale, from.y, { steps: 6 })
+  await page.keyboard.press('Escape')
+  await page.mouse.up()
+  await page.getByRole('button', { name: /^Undo/ }).click()
+  await expect.poll(() => placementsOf('Quarry Cottage')).toEqual(before)
+  await page.mouse.wheel(0, -400)
+  await page.getByRole('toolbar', { name: 'Tools' }).getByRole('button', { name: 'Farther' }).click()
+  await page.getByRole('toolbar', { name: 'Tools' }).getByRole('button', { name: 'Whole' }).click()
+  expect(placementsOf('Quarry Cottage')).toEqual(before)
 })

@@ -25,8 +25,8 @@ export default async function ProjectsPage({ searchParams }: Props) {
       <PageHeader title="Projects" actions={canCreate && all.length > 0 && NEW} />
       {all.length > 0 && (
         <form role="search" className="flex flex-wrap items-end gap-3">
-          <TextField type="search" name="q" label="Find a project" hint="Project, client or address" defaultValue={typed} className="w-full max-w-md" />
-          <Button type="submit" className="mb-7">Find</Button>
+          <TextField type="search" name="q" label="Find by project, client or address" defaultValue={typed} className="w-full max-w-md" />
+          <Button type="submit">Find</Button>
         </form>
       )}
       {all.length === 0 && <EmptyState title="No projects yet" action={canCreate && NEW}>A project is one commission at one property. Its house fronts are measured and planted here.</EmptyState>}

@@ -1,0 +1,30 @@
+/** axe finds nothing on any page, in either theme, at the size its people use. */
+import AxeBuilder from '@axe-core/playwright'
+import { expect, test } from '@playwright/test'
+import { PAGES, type Viewer } from '../support/endpoints'
+import { watchConsole } from './support/demo'
+import { contextFor, ids } from './support/viewers'
+
+const READERS = ['designer', 'client', 'nobody'] as const satisfies readonly Viewer[]
+
+for (const theme of ['paper', 'outdoors'] as const) {
+  for (const viewer of READERS) {
+    const pages = PAGES.filter(({ outcome }) => READERS.find((one) => outcome[one] === 'shown') === viewer)
+    test(`axe finds nothing on the ${pages.length} pages that a ${viewer} sees first, ${theme}`, async ({ browser }) => {
+      test.setTimeout(180_000)
+      const context = await contextFor(browser, viewer)
+      await context.addCookies([{ name: 'theme', value: theme, url: test.info().project.use.baseURL! }])
+      for (const { file, path } of pages) {
+        const page = await context.newPage()
+        const complaints = watchConsole(page)
+        await page.goto(path(ids()))
+        await page.waitForLoadState('networkidle')
+        const { violations } = await new AxeBuilder({ page }).analyze()
+        expect.soft(violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html.slice(0, 160)).join(' | ')}`), file).toEqual([])
+        expect.soft(complaints, file).toEqual([])
+        await page.close()
+      }
+      await context.close()
+    })
+  }
+}
