@@ -12,7 +12,7 @@ export const EMAILS = {
   stranger: 'wilf@lowfen.example',
 } as const satisfies Partial<Record<Viewer, string>>
 
-function ask<T>(sql: string, ...values: unknown[]): T[] {
+export function ask<T>(sql: string, ...values: unknown[]): T[] {
   const db = new Database(process.env.DATABASE_FILE ?? './.data/e2e.db', { readonly: true })
   try {
     return db.prepare(sql).all(...values) as T[]
