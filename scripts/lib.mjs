@@ -41,6 +41,12 @@ const lockHash = () => createHash('sha256').update(readFileSync(join(root, 'pack
 const addonWorks = () =>
   spawnSync(process.execPath, ['-e', "new (require('better-sqlite3'))(':memory:').prepare('select 1').get()"], { cwd: root, stdio: 'ignore' }).status === 0
 
+/** Where Node's own headers stand beside it, they are built against: nothing is fetched for it. */
+function ownHeaders() {
+  const place = dirname(dirname(process.execPath))
+  return existsSync(join(place, 'include/node/node.h')) ? { npm_config_nodedir: place } : {}
+}
+
 /** The compiled SQLite addon takes a minute to build: it is kept between installs of one version on one machine. */
 function bringAddon() {
   const lock = JSON.parse(readFileSync(join(root, 'package-lock.json'), 'utf8'))
@@ -54,7 +60,7 @@ function bringAddon() {
     if (addonWorks()) return
   }
   say('Compiling the SQLite addon (about a minute, once on this machine).')
-  if (!run('npm', ['rebuild', 'better-sqlite3']) || !addonWorks()) {
+  if (!run('npm', ['rebuild', 'better-sqlite3'], { env: ownHeaders() }) || !addonWorks()) {
     stop('The SQLite addon did not compile: python3, make and g++ are needed (on Debian: apt-get install python3 make g++).')
   }
   mkdirSync(dirname(kept), { recursive: true })

@@ -1,9 +1,8 @@
 'use client'
-import { useActionState, useSyncExternalStore } from 'react'
+import { useActionState, useState, useSyncExternalStore } from 'react'
 import { toast } from 'sonner'
-import { Button, Notice, TextField } from '@/components/ui'
+import { Button, Dialog, Notice, TextField, When } from '@/components/ui'
 import { UNTRIED, type SmallState } from './small-action'
-import { dateText } from './words'
 
 interface Link {
   id: string
@@ -34,12 +33,19 @@ async function copy(address: string) {
 }
 
 function OneLink({ link, revoke }: { link: Link; revoke: Props['revoke'] }) {
+  const [isOpen, setOpen] = useState(false)
   const [state, send, isPending] = useActionState(() => revoke(link.id), UNTRIED)
   return (
     <li className="flex flex-wrap items-center justify-between gap-3 border-t border-rule py-2">
-      <span>Made {dateText(link.createdAt)} by {link.createdBy}, opens until {dateText(link.expiresAt)}</span>
-      <form action={send}><Button type="submit" variant="danger" disabled={isPending} aria-label={`Revoke the link made ${dateText(link.createdAt)} by ${link.createdBy}`}>Revoke</Button></form>
-      {state.error && <Notice tone="error">{state.error}</Notice>}
+      <span>Made <When at={link.createdAt} to="minute" /> by {link.createdBy}, opens until <When at={link.expiresAt} /></span>
+      <Button variant="danger" onClick={() => setOpen(true)} aria-label={`Revoke the link made by ${link.createdBy}`}>Revoke</Button>
+      <Dialog title="Revoke this link?" description="Whoever holds it is shut out at once. It cannot be brought back; a new link can be made at any time." open={isOpen} onOpenChange={setOpen}>
+        {state.error && <Notice tone="error">{state.error}</Notice>}
+        <form action={send} className="mt-4 flex flex-wrap gap-3">
+          <Button type="submit" variant="danger" disabled={isPending}>Revoke it</Button>
+          <Button onClick={() => setOpen(false)}>Keep it</Button>
+        </form>
+      </Dialog>
     </li>
   )
 }

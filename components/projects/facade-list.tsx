@@ -1,10 +1,9 @@
 'use client'
 import { useActionState, useState } from 'react'
 import { FindingCounts } from '@/components/findings/finding-counts'
-import { Button, Dialog, LinkButton, Notice, TextField } from '@/components/ui'
+import { Button, Dialog, LinkButton, Notice, TextField, When } from '@/components/ui'
 import type { FindingKind } from '@/lib/spacing'
 import { UNTRIED, type SmallAction, type SmallState } from './small-action'
-import { dateText } from './words'
 
 interface Facade {
   id: string
@@ -69,8 +68,8 @@ function OneFacade({ facade, projectId, may, actions }: { facade: Facade } & Omi
   return (
     <li className="grid gap-3 border border-rule bg-sheet p-4">
       <h3 className="font-heading text-xl">{facade.name}</h3>
-      <FindingCounts counts={facade.counts} />
-      <p className="text-ink-soft">{facade.placements === 0 ? 'Nothing planted yet' : facade.placements === 1 ? 'One plant' : `${facade.placements} plants`}. Changed {dateText(facade.updatedAt)}.</p>
+      <FindingCounts counts={facade.counts} isPlanted={facade.placements > 0} />
+      <p className="text-ink-soft">{facade.placements === 0 ? 'No plants' : facade.placements === 1 ? 'One plant' : `${facade.placements} plants`}. Changed <When at={facade.updatedAt} />.</p>
       <div className="flex flex-wrap gap-3">
         {may.look && <LinkButton href={path} variant="primary" aria-label={`${may.draw ? 'Draw' : 'Look at'} ${facade.name}`}>{may.draw ? 'Draw' : 'Look'}</LinkButton>}
         {may.look && <LinkButton href={`${path}/measure`} aria-label={`${may.draw ? 'Measure' : 'Measures of'} ${facade.name}`}>{may.draw ? 'Measure' : 'Measures'}</LinkButton>}

@@ -1,9 +1,9 @@
 import Link from 'next/link'
 import type { Route } from 'next'
 import { FindingCounts } from '@/components/findings/finding-counts'
+import { When } from '@/components/ui'
 import { STAGE_WORDS, type Stage } from '@/lib/project'
 import type { FindingKind } from '@/lib/spacing'
-import { dateText } from './words'
 
 interface Project {
   id: string
@@ -14,12 +14,13 @@ interface Project {
   zone: string
   facades: { id: string; name: string }[]
   counts: Record<FindingKind, number>
+  placements: number
   updatedAt: number
 }
 
 /** One project in the list: who, where, how far, and what the check says of all its facades. */
 export function ProjectCard({ project }: { project: Project }) {
-  const { id, name, address, clientName, stage, zone, facades, counts, updatedAt } = project
+  const { id, name, address, clientName, stage, zone, facades, counts, placements, updatedAt } = project
   return (
     <article className="grid h-full content-start gap-2 border border-rule bg-sheet p-4">
       <div className="flex items-baseline justify-between gap-3">
@@ -29,8 +30,8 @@ export function ProjectCard({ project }: { project: Project }) {
         <span className="border border-ink-soft px-2 py-0.5">{STAGE_WORDS[stage]}</span>
       </div>
       <p>{[clientName, address].filter(Boolean).join(', ') || 'No client named yet'}</p>
-      <FindingCounts counts={counts} />
-      <p className="text-ink-soft">Zone {zone}. {facades.length === 0 ? 'No facade yet' : facades.map((facade) => facade.name).join(', ')}. Changed {dateText(updatedAt)}.</p>
+      <FindingCounts counts={counts} isPlanted={placements > 0} />
+      <p className="text-ink-soft">Zone {zone}. {facades.length === 0 ? 'No facade yet' : facades.map((facade) => facade.name).join(', ')}. Changed <When at={updatedAt} />.</p>
     </article>
   )
 }

@@ -12,6 +12,3 @@ export const AIM_WORDS: Record<Aim, string> = {
   birds: 'Birds', pollinators: 'Pollinators', deer: 'Safe from deer', children: 'Children play here', pets: 'Pets live here',
   'low-upkeep': 'Little upkeep', winter: 'Something to see in winter',
 }
-
-/** A moment as a date, the same on server and in browser. */
-export const dateText = (at: number): string => new Intl.DateTimeFormat('en-US', { day: 'numeric', month: 'short', year: 'numeric', timeZone: 'UTC' }).format(at)

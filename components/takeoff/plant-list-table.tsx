@@ -1,7 +1,7 @@
 import { WideTable } from '@/components/ui'
 import { BotanicalName } from '@/components/plants/botanical-name'
 import { formatLength } from '@/lib/measure'
-import type { PlantListRow } from '@/lib/takeoff'
+import { partsOf, totalOf, type PlantListRow } from '@/lib/takeoff'
 
 const range = ({ min, max }: { min: number; max: number }) => (min === max ? formatLength(min) : `${formatLength(min)} to ${formatLength(max)}`)
 
@@ -23,8 +23,19 @@ function Row({ row }: { row: PlantListRow }) {
   )
 }
 
-/** The plant list with its total. */
-export function PlantListTable({ rows, total }: { rows: readonly PlantListRow[]; total: number }) {
+function Sum({ word, count, remark, isFirst = false }: { word: string; count: number; remark: string; isFirst?: boolean }) {
+  return (
+    <tr className={isFirst ? 'border-t-2 border-ink' : 'border-t border-rule'}>
+      <th scope="row" className="px-3 py-2 text-left">{word}</th>
+      <td className="px-3 py-2 text-right font-mono font-bold tabular-nums">{count}</td>
+      <td colSpan={6} className="px-3 py-2 text-ink-soft">{remark}</td>
+    </tr>
+  )
+}
+
+/** The plant list with its sums; what stands there already is counted apart. */
+export function PlantListTable({ rows }: { rows: readonly PlantListRow[] }) {
+  const { fresh, existing } = partsOf(rows)
   return (
     <WideTable label="Plant list" className="border border-rule bg-sheet print:overflow-visible print:border-0">
       <table className="w-full border-collapse">
@@ -33,11 +44,9 @@ export function PlantListTable({ rows, total }: { rows: readonly PlantListRow[];
         </thead>
         <tbody>{rows.map((row, i) => <Row key={i} row={row} />)}</tbody>
         <tfoot>
-          <tr className="border-t-2 border-ink">
-            <th scope="row" className="px-3 py-2 text-left">Total</th>
-            <td className="px-3 py-2 text-right font-mono font-bold tabular-nums">{total}</td>
-            <td colSpan={6} className="px-3 py-2 text-ink-soft">as many as the drawing shows</td>
-          </tr>
+          {existing > 0 && <Sum word="New" count={fresh} remark="to be bought and planted" isFirst />}
+          {existing > 0 && <Sum word="Existing" count={existing} remark="stand there already and stay" />}
+          <Sum word="Total" count={totalOf(rows)} remark="as many as the drawing shows" isFirst={existing === 0} />
         </tfoot>
       </table>
     </WideTable>

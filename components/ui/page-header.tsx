@@ -22,12 +22,12 @@ export function PageHeader({ title, crumbs = [], actions, children }: PageHeader
   return (
     <header className="border-b border-rule pb-4">
       {crumbs.length > 0 && (
-        <nav aria-label="The way up">
+        <nav aria-label="The way up" className="print:hidden">
           <ol className="flex flex-wrap items-center gap-x-2 text-ink-soft">
-            {crumbs.map(({ href, label }) => (
+            {crumbs.map(({ href, label }, i) => (
               <li key={href} className="flex items-center gap-2">
+                {i > 0 && <span aria-hidden="true">/</span>}
                 <Link href={href as Route} className="inline-flex min-h-11 items-center underline decoration-rule underline-offset-4 hover:text-ink hover:decoration-ink">{label}</Link>
-                <span aria-hidden="true">/</span>
               </li>
             ))}
           </ol>

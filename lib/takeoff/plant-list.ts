@@ -15,6 +15,8 @@ export interface PlantListRow {
   matureSpread: { min: Inches; max: Inches }
   /** Middle distance from each to the nearest other of its plant, of whatever size; null where the drawing has one alone. */
   spacing: Inches | null
+  /** These stand there already and stay: nothing to buy. */
+  isExisting: boolean
   remarks: string
 }
 
@@ -72,7 +74,7 @@ function rowOf(plant: Plant, key: string, placements: Placement[], like: Placeme
     plantedHeight: planted.height, plantedSpread: planted.spread,
     matureHeight: { min: plant.heightMin, max: plant.heightMax },
     matureSpread: { min: plant.spreadMin, max: plant.spreadMax },
-    spacing: spacingOf(placements, like), remarks: remarksOf(placements),
+    spacing: spacingOf(placements, like), isExisting: placements[0]!.status === 'stays', remarks: remarksOf(placements),
   }
 }
 
@@ -96,3 +98,9 @@ export function buildPlantList(sheet: Pick<Sheet, 'plants' | 'placements'>): Pla
 
 /** How many plants the rows hold together. */
 export const totalOf = (rows: readonly PlantListRow[]): number => rows.reduce((sum, { quantity }) => sum + quantity, 0)
+
+/** How many of them are new, to be bought and planted, and how many stand there already. */
+export const partsOf = (rows: readonly PlantListRow[]): { fresh: number; existing: number } => ({
+  fresh: totalOf(rows.filter((row) => !row.isExisting)),
+  existing: totalOf(rows.filter((row) => row.isExisting)),
+})

@@ -1,8 +1,7 @@
 /** The people and studios of the demonstration: invented, with addresses nobody can own. */
 import type { MemberRole } from '@/lib/access'
 
-/** One password for all demo accounts. It exists only where this seed was asked for. */
-export const DEMO_PASSWORD = 'quiet hedges at noon'
+export { DEMO_PASSWORD } from '@/lib/server/people/demo-password'
 
 export interface DemoPerson {
   name: string

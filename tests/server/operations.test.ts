@@ -119,9 +119,10 @@ describe('the review queue', () => {
     saveEdits(as('designer', NOW + 9), { facadeId: 'facade-a', base: 0, editor: 'e', edits: [{ id: editId(1), op: 'put', kind: 'aspect', value: { light: 'full-sun' } }] })
     const queue = listQueue(as('reviewer'))
     expect(queue.map(({ facadeId }) => facadeId)).toEqual(['facade-a2', 'facade-a'])
-    expect(queue[0]).toMatchObject({ facadeName: 'Front of project-a2', projectName: 'House of project-a2', stage: 'draft', placements: 2 })
+    expect(queue[0]).toMatchObject({ facadeName: 'Front of project-a2', projectName: 'House of project-a2', stage: 'draft', placements: 2, updatedBy: 'designer' })
     expect(queue[0]!.counts.conflict).toBeGreaterThan(0)
     expect(queue[1]).toMatchObject({ counts: { conflict: 0, risk: 0, held: 0, note: 0 }, placements: 0, updatedAt: NOW + 9 })
+    expect(listProjects(as('reviewer')).find(({ id }) => id === 'project-a2')!.placements).toBe(2)
     expect(listProjects(as('reviewer')).find(({ id }) => id === 'project-a2')!.counts).toEqual(queue[0]!.counts)
   })
 

@@ -1,5 +1,5 @@
-import { desc, eq } from 'drizzle-orm'
-import { facades, projects } from '@/db/schema'
+import { count, desc, eq } from 'drizzle-orm'
+import { facades, placements, projects } from '@/db/schema'
 import type { Stage } from '@/lib/project'
 import { authorize } from '../authorize'
 import type { Context } from '../context'
@@ -16,6 +16,7 @@ export interface ProjectSummary {
   facades: { id: string; name: string; counts: Counts }[]
   /** Over all facades. */
   counts: Counts
+  placements: number
   /** Last change of the form or of any of its drawings, ms UTC. */
   updatedAt: number
 }
@@ -26,10 +27,18 @@ export function listProjects(context: Context): ProjectSummary[] {
   const { db, actor } = context
   freshenFindings(db, actor.studioId)
   const counts = countFindings(db, actor.studioId)
-  const fronts = db.select({ id: facades.id, name: facades.name, projectId: facades.projectId }).from(facades).where(eq(facades.studioId, actor.studioId)).orderBy(facades.createdAt).all()
+  const fronts = db
+    .select({ id: facades.id, name: facades.name, projectId: facades.projectId, placements: count(placements.id) })
+    .from(facades)
+    .leftJoin(placements, eq(placements.facadeId, facades.id))
+    .where(eq(facades.studioId, actor.studioId))
+    .groupBy(facades.id)
+    .orderBy(facades.createdAt)
+    .all()
   const rows = db.select().from(projects).where(eq(projects.studioId, actor.studioId)).orderBy(desc(projects.updatedAt), projects.id).all()
   return rows.map(({ id, name, address, clientName, stage, zone, updatedAt }) => {
-    const own = fronts.filter(({ projectId }) => projectId === id).map((front) => ({ id: front.id, name: front.name, counts: counts.get(front.id) ?? noCounts() }))
-    return { id, name, address, clientName, stage, zone, facades: own, counts: sumCounts(own.map((front) => front.counts)), updatedAt }
+    const own = fronts.filter(({ projectId }) => projectId === id).map((front) => ({ ...front, counts: counts.get(front.id) ?? noCounts() }))
+    const planted = own.reduce((sum, front) => sum + front.placements, 0)
+    return { id, name, address, clientName, stage, zone, facades: own, counts: sumCounts(own.map((front) => front.counts)), placements: planted, updatedAt }
   })
 }

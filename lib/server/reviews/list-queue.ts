@@ -1,5 +1,5 @@
-import { count, eq } from 'drizzle-orm'
-import { facades, placements, projects } from '@/db/schema'
+import { count, eq, sql } from 'drizzle-orm'
+import { edits, facades, people, placements, projects } from '@/db/schema'
 import type { Stage } from '@/lib/project'
 import { authorize } from '../authorize'
 import type { Context } from '../context'
@@ -16,6 +16,8 @@ export interface QueueItem {
   placements: number
   /** Last saved edit, ms UTC. */
   updatedAt: number
+  /** Who made it; null when nothing was drawn yet. */
+  updatedBy: string | null
 }
 
 const byUrgency = (a: QueueItem, b: QueueItem) =>
@@ -31,6 +33,7 @@ export function listQueue(context: Context): QueueItem[] {
     .select({
       facadeId: facades.id, facadeName: facades.name, projectId: projects.id, projectName: projects.name, stage: projects.stage,
       placements: count(placements.id), updatedAt: facades.updatedAt,
+      updatedBy: sql<string | null>`(select ${people.name} from ${edits} join ${people} on ${people.id} = ${edits.personId} where ${edits.facadeId} = ${facades.id} order by ${edits.seq} desc limit 1)`,
     })
     .from(facades)
     .innerJoin(projects, eq(projects.id, facades.projectId))

@@ -3,7 +3,7 @@ import fc from 'fast-check'
 import Papa from 'papaparse'
 import { describe, expect, it } from 'vitest'
 import type { Placement } from '@/lib/spacing'
-import { buildPlantList, harmless, plantListCsv, totalOf } from '@/lib/takeoff'
+import { buildPlantList, harmless, partsOf, plantListCsv, totalOf } from '@/lib/takeoff'
 import { makePlacement, makePlant } from '../../support/sheets'
 
 const plants = [makePlant({ id: 'p1', botanical: "Ilex glabra 'Shamrock'" }), makePlant({ id: 'p2', botanical: 'Nepeta racemosa' })]
@@ -24,6 +24,7 @@ describe('the plant list', () => {
   it('leaves out what goes and sets apart what stays', () => {
     const rows = buildPlantList({ plants, placements: [at('a', 0), at('b', 40, { status: 'goes' }), at('c', 80, { status: 'stays' })] })
     expect(rows.map(({ quantity, remarks }) => [quantity, remarks])).toEqual([[1, ''], [1, 'existing, stays']])
+    expect(partsOf(rows)).toEqual({ fresh: 1, existing: 1 })
   })
 
   it('says what is kept clipped, the hedge and the drift', () => {

@@ -6,7 +6,6 @@ import { AppError } from '@/lib/errors'
 import type { Context } from '@/lib/server/context'
 import { requireContext } from '@/lib/server/people/require-context'
 import { getPlantList } from '@/lib/server/takeoffs/get-plant-list'
-import { totalOf } from '@/lib/takeoff'
 
 export const metadata: Metadata = { title: 'Plant list' }
 
@@ -42,7 +41,7 @@ export default async function PlantListPage({ params }: Props) {
       </PageHeader>
       {rows.length === 0
         ? <EmptyState title="Nothing to count yet" action={<LinkButton href={table} variant="primary">Open the drawing table</LinkButton>}>Plants placed on this facade are counted here.</EmptyState>
-        : <PlantListTable rows={rows} total={totalOf(rows)} />}
+        : <PlantListTable rows={rows} />}
     </main>
   )
 }
