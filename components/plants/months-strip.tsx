@@ -35,12 +35,12 @@ function bandsOf({ bloomMonths, bloomColor, fruitMonths, fruitColor, fallColor }
 export function MonthsStrip({ plant }: { plant: LibraryPlant }) {
   return (
     <WideTable label="Months of flower, fruit and fall color">
-      <table className="w-full min-w-136 table-fixed border-collapse text-center">
+      <table className="w-full min-w-88 table-fixed border-collapse text-center">
         <caption className="sr-only">Months of flower, fruit and fall color</caption>
         <thead>
           <tr>
-            <th scope="col" className="w-24 text-left text-sm font-normal text-ink-soft">Month</th>
-            {MONTHS.map((month) => <th key={month} scope="col" className="text-sm font-normal text-ink-soft">{monthName(month)}</th>)}
+            <th scope="col" className="w-20 text-left text-sm font-normal text-ink-soft">Month</th>
+            {MONTHS.map((month) => <th key={month} scope="col" abbr={monthName(month)} className="text-sm font-normal text-ink-soft"><span aria-hidden="true">{monthName(month)[0]}</span><span className="sr-only">{monthName(month)}</span></th>)}
           </tr>
         </thead>
         <tbody>

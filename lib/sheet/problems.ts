@@ -2,7 +2,7 @@
  * What the fields of a sheet owe each other: sill under head, windows on the wall, outlines that do not cross
  * themselves, plants that are known. Every problem names its field and says a plain sentence.
  */
-import { RULES, polygonCrossesItself, polygonArea, type Point, type Sheet } from '../spacing'
+import { STANDARDS, polygonCrossesItself, polygonArea, type Point, type Sheet } from '../spacing'
 
 /** A field by its path in the sheet, and what is wrong with it. */
 export interface Problem {
@@ -88,15 +88,15 @@ function twinProblems(sheet: Sheet): Problem[] {
 
 /** What is wrong with one entry of the standards, as a sentence; null when it is fair. */
 export function standardProblem(key: string, value: number | string): string | null {
-  const rule = RULES.find(({ meta }) => key.startsWith(`${meta.id}.`))
-  const setting = rule?.meta.settings.find(({ name }) => name === key)
+  const meta = STANDARDS.find(({ id }) => key.startsWith(`${id}.`))
+  const setting = meta?.settings.find(({ name }) => name === key)
   if (setting) {
     return typeof value === 'number' && value >= setting.min && value <= setting.max
       ? null
       : `${setting.label} must be a number from ${setting.min} to ${setting.max}.`
   }
-  if (rule?.meta.fixedKind && key === `${rule.meta.id}.kind`) {
-    return ['off', 'note', 'risk'].includes(String(value)) ? null : `${rule.meta.title} can be off, note or risk.`
+  if (meta?.fixedKind && key === `${meta.id}.kind`) {
+    return ['off', 'note', 'risk'].includes(String(value)) ? null : `${meta.title} can be off, note or risk.`
   }
   return 'There is no such setting.'
 }

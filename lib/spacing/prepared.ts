@@ -4,7 +4,7 @@ import { makeCrown, type Crown } from './crown'
 import { boxOf, type Box } from './geometry/box'
 import { groundAt } from './geometry/ground'
 import { pointInPolygon } from './geometry/polygon'
-import { Strips } from './geometry/strips'
+import { Strips, type Nearby } from './geometry/strips'
 import { wallDistance } from './geometry/wall'
 import { clearStemOf, courseOf, sizeOn, type When } from './growth'
 import type { Bed, Bound, ByBound, Inches, Opening, Placement, Sheet, Walk } from './types'
@@ -41,10 +41,10 @@ export interface Prepared {
   grown: Grown[]
   plants: Map<string, Plant>
   /** What is found by its place along the wall: placements by the most they can ever take. */
-  neighbours: Strips<Grown>
-  windows: Strips<Opening>
-  walks: Strips<Outlined<Walk>>
-  beds: Strips<Outlined<Bed>>
+  neighbours: Nearby<Grown>
+  windows: Nearby<Opening>
+  walks: Nearby<Outlined<Walk>>
+  beds: Nearby<Outlined<Bed>>
 }
 
 export const byBound = <T>(of: (bound: Bound) => T): ByBound<T> => ({ low: of('low'), expected: of('expected'), high: of('high') })

@@ -1,10 +1,14 @@
 import { RULES } from './rules'
-import type { Sheet } from './types'
+import { UPKEEP_META } from './upkeep'
+import type { RuleMeta, Sheet } from './types'
 
 export type Standards = Record<string, number | string>
 
+/** Everything a studio may set, rule by rule, in the order people meet it. */
+export const STANDARDS: readonly RuleMeta[] = [...RULES.map(({ meta }) => meta), UPKEEP_META]
+
 const DEFAULTS: Readonly<Standards> = Object.freeze(
-  Object.fromEntries(RULES.flatMap(({ meta }) => meta.settings.map((setting) => [setting.name, setting.default]))),
+  Object.fromEntries(STANDARDS.flatMap((meta) => meta.settings.map((setting) => [setting.name, setting.default]))),
 )
 
 /** Every setting of every rule at its default. */

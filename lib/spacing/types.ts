@@ -161,7 +161,7 @@ export interface YearRange {
 /** A way out the engine has itself checked. */
 export type Remedy =
   | { kind: 'move'; placement: string; x: Inches; y: Inches }
-  | { kind: 'swap'; placement: string; plant: string }
+  | { kind: 'swap'; placements: string[]; plant: string }
   | { kind: 'keep'; placement: string; kept: Size; clippings: number }
   | { kind: 'specimen'; placement: string }
 
@@ -200,6 +200,7 @@ export interface Upkeep {
   placement: string
   clippingsPerYear: number
   minutesPerYear: number
+  minutesOverTenYears: number
 }
 
 export interface Report {
@@ -228,7 +229,7 @@ export interface Setting {
   default: number
   min: number
   max: number
-  unit: 'in' | 'share'
+  unit: 'in' | 'share' | 'min'
 }
 
 export interface RuleMeta {

@@ -15,7 +15,12 @@ interface Entry<T> {
 
 const stripOf = (x: Inches) => Math.floor(x / WIDTH)
 
-export class Strips<T> {
+/** Whatever is asked for by its place along the wall. */
+export interface Nearby<T> {
+  near(from: Inches, to: Inches): T[]
+}
+
+export class Strips<T> implements Nearby<T> {
   private readonly strips = new Map<number, Entry<T>[]>()
   private readonly wide: Entry<T>[] = []
 

@@ -1,10 +1,9 @@
-import { judgedPlants } from '../by-plant'
+import { idsOf } from '../by-plant'
 import type { Rule } from '../rule'
-import type { Finding } from '../types'
 import { findingOf } from '../finding'
 
 export const hardiness: Rule = {
-  scope: 'sheet',
+  scope: 'plant',
   meta: {
     id: 'hardiness',
     title: 'Hardiness',
@@ -14,13 +13,11 @@ export const hardiness: Rule = {
     sources: [{ publisher: 'USDA Agricultural Research Service', title: 'Plant Hardiness Zone Map 2023', address: 'https://planthardiness.ars.usda.gov/', known: 'read' }],
     notes: 'The number of the zone without its half: a plant of zones 4-8 fits 4a to 8b. The zone says nothing of heat, so above the range is a risk.',
   },
-  judge: (prepared) => {
-    const zone = parseInt(prepared.sheet.site.zone, 10)
-    return judgedPlants(prepared).flatMap(({ plant, placements }): Finding[] => {
-      const isCold = plant.zoneMin !== null && zone < plant.zoneMin
-      const isWarm = plant.zoneMax !== null && zone > plant.zoneMax
-      if (!isCold && !isWarm) return []
-      return [findingOf({ rule: 'hardiness', kind: isCold ? 'conflict' : 'risk', placements, feature: plant.id })]
-    })
+  judge: ({ sheet }, { plant, placements }) => {
+    const zone = parseInt(sheet.site.zone, 10)
+    const isCold = plant.zoneMin !== null && zone < plant.zoneMin
+    const isWarm = plant.zoneMax !== null && zone > plant.zoneMax
+    if (!isCold && !isWarm) return null
+    return findingOf({ rule: 'hardiness', kind: isCold ? 'conflict' : 'risk', placements: idsOf(placements), feature: plant.id })
   },
 }

@@ -1,9 +1,9 @@
-import { judgedPlants } from '../by-plant'
+import { idsOf } from '../by-plant'
 import type { Rule } from '../rule'
 import { findingOf } from '../finding'
 
 export const light: Rule = {
-  scope: 'sheet',
+  scope: 'plant',
   meta: {
     id: 'light',
     title: 'Light',
@@ -15,10 +15,6 @@ export const light: Rule = {
     ],
     notes: 'A plant whose light is not known is not judged.',
   },
-  judge: (prepared) =>
-    judgedPlants(prepared).flatMap(({ plant, placements }) =>
-      plant.light.length === 0 || plant.light.includes(prepared.sheet.site.light)
-        ? []
-        : [findingOf({ rule: 'light', kind: 'risk', placements, feature: plant.id })],
-    ),
+  judge: ({ sheet }, { plant, placements }) =>
+    plant.light.length === 0 || plant.light.includes(sheet.site.light) ? null : findingOf({ rule: 'light', kind: 'risk', placements: idsOf(placements), feature: plant.id }),
 }

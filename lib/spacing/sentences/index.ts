@@ -4,15 +4,17 @@ import { CLEARANCES } from './clearances'
 import { Names } from './names'
 import { NEIGHBOURS } from './neighbours'
 import { SITE } from './site'
+import { describeRemedy } from './ways-out'
 import type { RuleWords } from './words'
 
+export { describeMiss, describeRemedy, NO_WAY_OUT } from './ways-out'
 export { lengthText, shareText, yearsText } from './words'
 
 export interface Description {
   /** Who or what it is about: plants by their botanical names. */
   title: string
   sentence: string
-  /** What could be done, where the check has found something; '' where it has looked for nothing. */
+  /** The first way out, where ways out were looked for and found; else ''. */
   wayOut: string
 }
 
@@ -24,5 +26,6 @@ export function describe(finding: Finding, sheet: Sheet): Description {
   const words = WORDS[finding.rule]
   const sentence = words ? words.say(finding, names, sheet) : `Judged by a rule this version does not know: ${finding.rule}.`
   const plants = () => [...new Set(finding.placements.map((id) => names.plant(id)))].join(' and ')
-  return { title: words?.title?.(finding, names, sheet) ?? plants(), sentence, wayOut: '' }
+  const [first] = finding.remedies
+  return { title: words?.title?.(finding, names, sheet) ?? plants(), sentence, wayOut: first ? describeRemedy(first, finding, sheet) : '' }
 }

@@ -72,7 +72,7 @@ test('any of them is judged and told, in figures', () => {
 test('one placement of it has what the full check gives it', () => {
   fc.assert(fc.property(sound, (sheet) => {
     const ready = prepare(sheet)
-    const site = new Set(RULES.filter(({ scope }) => scope === 'sheet').map(({ meta }) => meta.id))
+    const site = new Set(RULES.filter(({ scope }) => scope === 'sheet' || scope === 'plant').map(({ meta }) => meta.id))
     const whole = check(sheet).findings.filter(({ rule }) => !site.has(rule))
     for (const one of sheet.placements) {
       expect(checkPlacement(ready, one)).toEqual(whole.filter(({ placements }) => placements.includes(one.id)))
@@ -83,7 +83,7 @@ test('one placement of it has what the full check gives it', () => {
 test('a new placement has what the full check gives it once it stands on the sheet', () => {
   fc.assert(fc.property(sound, placement, (sheet, more) => {
     const added = { ...more, id: 'new' }
-    const site = new Set(RULES.filter(({ scope }) => scope === 'sheet').map(({ meta }) => meta.id))
+    const site = new Set(RULES.filter(({ scope }) => scope === 'sheet' || scope === 'plant').map(({ meta }) => meta.id))
     const whole = check({ ...sheet, placements: [...sheet.placements, added] }).findings
     expect(checkPlacement(prepare(sheet), added)).toEqual(whole.filter(({ rule, placements }) => !site.has(rule) && placements.includes('new')))
   }), runs)

@@ -3,7 +3,7 @@ import { describe, expect, test } from 'vitest'
 import { check, checkPlacement, prepare, RULES, type Finding, type Sheet } from '@/lib/spacing'
 import { anySheet } from '../../support/sheets'
 
-const SITE = new Set(RULES.filter(({ scope }) => scope === 'sheet').map(({ meta }) => meta.id))
+const SITE = new Set(RULES.filter(({ scope }) => scope === 'sheet' || scope === 'plant').map(({ meta }) => meta.id))
 
 /** The same examples on every run. */
 const runs = (numRuns: number) => ({ seed: 20_260, numRuns })
