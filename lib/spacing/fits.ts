@@ -4,7 +4,7 @@ import { crownVolume, makeCrown } from './crown'
 import { compareText } from './finding'
 import { groundAt } from './geometry/ground'
 import { sizeRange } from './growth'
-import { findingsOfPlacement, findingsOfPlant } from './judge'
+import { tellOfPlacement, tellOfPlant } from './judge'
 import { growPlacement, type Grown, type Prepared } from './prepared'
 import type { Finding, Inches, Placement, Point, Size } from './types'
 
@@ -70,10 +70,8 @@ const placementAt = ({ x, y }: Spot, plant: string, planted: Size): Placement =>
 /** A plant too low for its place hides behind others; that bounds its height from below, all else from above. */
 const isHiddenBehind = ({ rule, placements }: Finding) => rule === 'layer-order' && placements[1] === PROBE
 
-function hasObjection(prepared: Prepared, one: Grown, counts: (finding: Finding) => boolean): boolean {
-  for (const finding of findingsOfPlacement(prepared, one)) if (isBad(finding) && counts(finding)) return true
-  return false
-}
+const hasObjection = (prepared: Prepared, one: Grown, counts: (finding: Finding) => boolean): boolean =>
+  tellOfPlacement(prepared, one, (finding) => isBad(finding) && counts(finding))
 
 /** The tallest whole-inch height at which a crown of this spread breaks nothing; 0 where even the lowest does, null where it would only be hidden. */
 function tallest(prepared: Prepared, spot: Spot, spread: Inches): Inches | null {
@@ -112,8 +110,8 @@ function objectionsTo(prepared: Prepared, spot: Spot, plant: Plant): Finding[] {
   const placement = placementAt(spot, plant.id, { height: Math.min(size.height, LEAST_IN), spread: Math.min(size.spread, LEAST_IN) })
   const one = growPlacement(prepared, plant, placement)
   const found: Finding[] = []
-  for (const finding of findingsOfPlant(prepared, { plant, placements: [one] })) if (isBad(finding) && found.push(finding) > 1) return found
-  for (const finding of findingsOfPlacement(prepared, one)) if (isBad(finding) && found.push(finding) > 1) return found
+  const hear = (finding: Finding) => isBad(finding) && found.push(finding) > 1
+  if (!tellOfPlant(prepared, { plant, placements: [one] }, hear)) tellOfPlacement(prepared, one, hear)
   return found
 }
 

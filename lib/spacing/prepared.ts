@@ -7,7 +7,7 @@ import { pointInPolygon } from './geometry/polygon'
 import { Strips, type Nearby } from './geometry/strips'
 import { wallDistance } from './geometry/wall'
 import { clearStemOf, courseOf, sizeOn, type When } from './growth'
-import type { Bed, Bound, ByBound, Inches, Opening, Placement, Sheet, Walk } from './types'
+import type { Bed, Bound, ByBound, Fixture, Inches, Opening, Placement, Sheet, Walk } from './types'
 
 /** One placement, grown. */
 export interface Grown {
@@ -42,7 +42,11 @@ export interface Prepared {
   plants: Map<string, Plant>
   /** What is found by its place along the wall: placements by the most they can ever take. */
   neighbours: Nearby<Grown>
+  /** Mates by the name of their drift. */
+  drifts: ReadonlyMap<string, readonly Grown[]>
   windows: Nearby<Opening>
+  doors: Nearby<Opening>
+  fixtures: Nearby<Fixture>
   walks: Nearby<Outlined<Walk>>
   beds: Nearby<Outlined<Bed>>
 }
@@ -52,7 +56,7 @@ export const byBound = <T>(of: (bound: Bound) => T): ByBound<T> => ({ low: of('l
 /** The stretch along the wall that a placement can ever take. */
 export const stretchOf = ({ placement: { x }, widest }: Grown) => ({ from: x - widest, to: x + widest })
 
-type Fixed = Omit<Prepared, 'grown' | 'neighbours'>
+type Fixed = Omit<Prepared, 'grown' | 'neighbours' | 'drifts'>
 
 function bedsAt({ beds }: Fixed, placement: Placement): () => readonly Bed[] {
   let found: readonly Bed[] | null = null
@@ -90,13 +94,28 @@ export function growPlacement(fixed: Fixed, plant: Plant, placement: Placement):
 const outlined = <T extends Walk | Bed>(things: readonly T[]): Strips<Outlined<T>> =>
   new Strips(things.map((thing) => ({ thing, box: boxOf(thing.outline) })), ({ box }) => ({ from: box.left, to: box.right }))
 
+/** Plants by the name of their drift; those of none are left out. */
+export function byDrift(grown: readonly Grown[]): Map<string, Grown[]> {
+  const drifts = new Map<string, Grown[]>()
+  for (const one of grown) {
+    const { drift } = one.placement
+    if (drift === undefined) continue
+    const mates = drifts.get(drift)
+    if (mates) mates.push(one)
+    else drifts.set(drift, [one])
+  }
+  return drifts
+}
+
 /** Makes a sheet ready to be judged by the standards in force on it. */
 export function growSheet(sheet: Sheet, standards: Prepared['standards']): Prepared {
-  const windows = sheet.openings.filter(({ kind }) => kind === 'window')
+  const wide = <T extends Opening | Fixture>(things: readonly T[]) => new Strips(things, ({ x, width }) => ({ from: x, to: x + width }))
   const fixed: Fixed = {
     sheet, standards,
     plants: new Map(sheet.plants.map((plant) => [plant.id, plant])),
-    windows: new Strips(windows, ({ x, width }) => ({ from: x, to: x + width })),
+    windows: wide(sheet.openings.filter(({ kind }) => kind === 'window')),
+    doors: wide(sheet.openings.filter(({ kind }) => kind === 'door')),
+    fixtures: wide(sheet.fixtures),
     walks: outlined(sheet.walks),
     beds: outlined(sheet.beds),
   }
@@ -104,7 +123,7 @@ export function growSheet(sheet: Sheet, standards: Prepared['standards']): Prepa
     const plant = fixed.plants.get(placement.plant)
     return plant && placement.status !== 'goes' ? [growPlacement(fixed, plant, placement)] : []
   })
-  return { ...fixed, grown, neighbours: new Strips(grown, stretchOf) }
+  return { ...fixed, grown, neighbours: new Strips(grown, stretchOf), drifts: byDrift(grown) }
 }
 
 /** A standard that is a number. */

@@ -1,6 +1,6 @@
 /** Sheets for tests of the check: a level, plain house front on which one thing at a time is wrong. Inches. */
 import fc from 'fast-check'
-import { check, type Finding, type Opening, type Placement, type Point, type Sheet, type Walk } from '@/lib/spacing'
+import { check, type Fixture, type Finding, type Opening, type Bed, type Placement, type Point, type Sheet, type Walk } from '@/lib/spacing'
 import { CATEGORIES, GROWTHS, HABITS, LEAVES, LIGHTS, type Plant } from '@/lib/plants/types'
 
 export function makePlant(changes: Partial<Plant> = {}): Plant {
@@ -35,6 +35,10 @@ export function makeSheet(changes: Partial<Sheet> = {}): Sheet {
 export const makeWindow = (changes: Partial<Opening> = {}): Opening => ({ id: 'w1', kind: 'window', name: 'Kitchen', x: 200, width: 72, sill: 36, head: 84, ...changes })
 export const makeWalk = (from: number, to = from + 48): Walk => ({ id: 'k1', name: 'Front walk', outline: rectangle(0, 480, from, to) })
 
+export const makeDoor = (changes: Partial<Opening> = {}): Opening => ({ id: 'd1', kind: 'door', name: 'Front door', x: 200, width: 40, sill: 8, head: 88, ...changes })
+export const makeFixture = (kind: Fixture['kind'], changes: Partial<Fixture> = {}): Fixture => ({ id: 'f1', kind, x: 232, y: 0, width: 16, depth: 8, z: 30, height: 24, ...changes })
+export const makeBed = (changes: Partial<Bed> = {}): Bed => ({ id: 'b1', name: 'Front bed', outline: rectangle(0, 480, 0, 96), ...changes })
+
 /** What one rule finds. */
 export const found = (sheet: Sheet, rule: string): Finding[] => check(sheet).findings.filter((finding) => finding.rule === rule)
 
@@ -42,7 +46,7 @@ const part = (low: number, high: number) => fc.integer({ min: low * 64, max: hig
 
 const anyPlant = (id: string) => fc.record({
   category: fc.constantFrom(...CATEGORIES), leaf: fc.constantFrom(...LEAVES), habit: fc.constantFrom(...HABITS), growth: fc.constantFrom(...GROWTHS),
-  height: part(8, 90), spread: part(8, 90), more: part(0, 60), zoneMin: fc.integer({ min: 1, max: 7 }), light: fc.subarray([...LIGHTS]),
+  height: part(8, 90), spread: part(8, 90), more: part(0, 60), zoneMin: fc.integer({ min: 1, max: 7 }), light: fc.subarray([...LIGHTS]), thorns: fc.boolean(),
 }).map(({ height, spread, more, ...rest }) => makePlant({ ...rest, id, heightMin: height, heightMax: height + more, spreadMin: spread, spreadMax: spread + more }))
 
 const anyPlacement = (id: string) => fc.record({
@@ -57,7 +61,8 @@ const anyPlacement = (id: string) => fc.record({
 export const anySheet: fc.Arbitrary<Sheet> = fc.tuple(anyPlant('p1'), anyPlant('p2'), anyPlant('p3'), fc.integer({ min: 1, max: 9 }), part(-30, 30))
   .chain(([one, two, three, count, jog]) => fc.tuple(...Array.from({ length: count }, (_, i) => anyPlacement(`a${i}`))).map((placements) => makeSheet({
     facade: { ...makeSheet().facade, wall: [{ x: 0, y: 0 }, { x: 200, y: 0 }, { x: 200, y: jog }, { x: 480, y: jog }], grade: [{ x: 0, z: 0 }, { x: 480, z: -8 }], fall: 0.0625, gutter: 110, overhang: 16 },
-    openings: [makeWindow({ x: 40 }), makeWindow({ id: 'w2', x: 300, sill: 24 })],
+    openings: [makeWindow({ x: 40 }), makeWindow({ id: 'w2', x: 300, sill: 24 }), makeDoor({ x: 130 })],
+    fixtures: [makeFixture('electric-meter', { x: 390 }), makeFixture('house-number', { id: 'f2', x: 180, z: 60, height: 6 }), makeFixture('hose-bib', { id: 'f3', x: 20, width: 4, height: 6 })],
     walks: [makeWalk(100)],
     beds: [{ id: 'b1', name: 'Left', outline: rectangle(0, 230, 0, 100) }, { id: 'b2', name: 'Right', outline: rectangle(220, 480, 30, 100) }],
     plants: [one, two, three], placements,

@@ -4,6 +4,8 @@ import { upkeepOf } from '../upkeep'
 import { applyRemedy } from './apply'
 import type { Trial } from './trial'
 
+/** Once it is clear of its neighbours, a size refused by the whole sheet is seldom mended by a smaller one. */
+const MOST_CHECKS = 5
 /** Smaller than this no shrub is worth its shears. */
 const LEAST_KEPT_IN = 12
 
@@ -23,6 +25,7 @@ export function findKeep(trial: Trial, finding: Finding, placement: Placement): 
   const natural = matureSize(plant, placement, 'expected')
   const most = matureSize(plant, placement, 'high')
   const share = natural.spread / natural.height
+  let checks = 0
   for (let height = Math.ceil(most.height) - 1; height >= LEAST_KEPT_IN; height--) {
     const kept = { height, spread: Math.floor(height * share) }
     if (kept.spread < LEAST_KEPT_IN) return null
@@ -30,6 +33,7 @@ export function findKeep(trial: Trial, finding: Finding, placement: Placement): 
     if (trial.isRefused(plant, changed, finding.key)) continue
     const remedy = { kind: 'keep' as const, placement: placement.id, kept, clippings: upkeepOf(trial.prepared, plant, changed).clippingsPerYear }
     if (trial.isBetter(applyRemedy(trial.sheet, remedy), finding.key)) return remedy
+    if (++checks >= MOST_CHECKS) return null
   }
   return null
 }

@@ -1,6 +1,6 @@
 /** A sheet on which ways out are tried: what it has against it now, and whether a change makes it better and nothing worse. */
 import type { Plant } from '../../plants/types'
-import { findingsOfPlant, findingsOfPlacement, allFindings } from '../judge'
+import { allFindings, tellOfPlacement, tellOfPlant } from '../judge'
 import { growPlacement, growSheet, type Prepared } from '../prepared'
 import { resolveStandards } from '../standards'
 import type { Finding, FindingKind, Placement, Sheet } from '../types'
@@ -28,17 +28,14 @@ export class Trial {
 
   /** Looks at size and neighbours of one placement alone, and stops at the first objection. */
   isRefused(plant: Plant, placement: Placement, unwanted: string): boolean {
-    const one = growPlacement(this.prepared, plant, placement)
-    for (const finding of findingsOfPlacement(this.prepared, one)) if (this.isRefusing(finding, unwanted)) return true
-    return false
+    return tellOfPlacement(this.prepared, growPlacement(this.prepared, plant, placement), (finding) => this.isRefusing(finding, unwanted))
   }
 
   /** Has it no conflict and no risk of its own there, of size, neighbours and site? */
   isFreeOfFindings(plant: Plant, placement: Placement): boolean {
     const one = growPlacement(this.prepared, plant, placement)
-    for (const { kind } of findingsOfPlant(this.prepared, { plant, placements: [one] })) if (badness(kind) > 0) return false
-    for (const { kind } of findingsOfPlacement(this.prepared, one)) if (badness(kind) > 0) return false
-    return true
+    const isBad = ({ kind }: Finding) => badness(kind) > 0
+    return !tellOfPlant(this.prepared, { plant, placements: [one] }, isBad) && !tellOfPlacement(this.prepared, one, isBad)
   }
 
   /** The whole check of the changed sheet: the finding is no conflict and no risk any more, and none came or grew worse. */

@@ -1,4 +1,4 @@
-import { idsOf } from '../by-plant'
+import { idsOf, toBePlanted } from '../by-plant'
 import type { Rule } from '../rule'
 import { findingOf } from '../finding'
 
@@ -15,6 +15,10 @@ export const light: Rule = {
     ],
     notes: 'A plant whose light is not known is not judged.',
   },
-  judge: ({ sheet }, { plant, placements }) =>
-    plant.light.length === 0 || plant.light.includes(sheet.site.light) ? null : findingOf({ rule: 'light', kind: 'risk', placements: idsOf(placements), feature: plant.id }),
+  judge: ({ sheet }, judged) => {
+    const { plant } = judged
+    const placements = toBePlanted(judged)
+    if (placements.length === 0 || plant.light.length === 0 || plant.light.includes(sheet.site.light)) return null
+    return findingOf({ rule: 'light', kind: 'risk', placements: idsOf(placements), feature: plant.id })
+  },
 }

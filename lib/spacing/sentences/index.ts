@@ -1,6 +1,9 @@
 /** All that the check says, in plain sentences made from its data. No sentence stands anywhere else. */
 import type { Finding, Sheet } from '../types'
 import { CLEARANCES } from './clearances'
+import { COMPOSITION } from './composition'
+import { FIXTURES } from './fixtures'
+import { GROUND } from './ground'
 import { Names } from './names'
 import { NEIGHBOURS } from './neighbours'
 import { SITE } from './site'
@@ -18,7 +21,7 @@ export interface Description {
   wayOut: string
 }
 
-const WORDS: Record<string, RuleWords> = { ...CLEARANCES, ...NEIGHBOURS, ...SITE }
+const WORDS: Record<string, RuleWords> = { ...CLEARANCES, ...FIXTURES, ...NEIGHBOURS, ...COMPOSITION, ...SITE, ...GROUND }
 
 /** A finding in words: who, what, by how much, when. Names what is no longer on the sheet as such. */
 export function describe(finding: Finding, sheet: Sheet): Description {

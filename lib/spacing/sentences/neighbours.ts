@@ -19,7 +19,11 @@ const sayLayers: Say = (finding, names) => {
   return `${atLargest(finding)}${rises}${when(finding)}.`
 }
 
+const sayOpenDrift: Say = (finding) =>
+  `Stands ${lengthText(finding.measured?.expected ?? 0)} from the nearest of its drift, ${by(finding)} too far to grow together.`
+
 export const NEIGHBOURS: Record<string, RuleWords> = {
+  'open-drift': { say: sayOpenDrift },
   crowding: { say: sayCrowding },
   'layer-order': { say: sayLayers, title: ({ placements }, names) => names.plant(placements[0]) },
 }

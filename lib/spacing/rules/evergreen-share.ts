@@ -1,0 +1,28 @@
+import { plantedBeds, volumeShare } from '../by-bed'
+import { findingOf } from '../finding'
+import type { Leaf } from '../../plants/types'
+import type { Rule } from '../rule'
+
+const LEAST = 0.33
+const MOST = 0.67
+
+const WEIGHTS: Record<Leaf, number> = { deciduous: 0, 'semi-evergreen': 0.5, 'broadleaf-evergreen': 1, 'needle-evergreen': 1, 'scale-evergreen': 1, herbaceous: 0 }
+
+export const evergreenShare: Rule = {
+  scope: 'sheet',
+  meta: {
+    id: 'evergreen-share',
+    title: 'Evergreens',
+    question: 'Is there enough green in winter, and not too much of it?',
+    settings: [],
+    fixedKind: 'note',
+    sources: [{ publisher: 'Common practice', title: 'A third to two thirds of the woody plants evergreen', address: null, known: 'practice' }],
+    notes: 'By crown volume of the woody plants at expected maturity; semi-evergreen counts half. Beds without woody plants are not judged.',
+  },
+  judge: (prepared) =>
+    plantedBeds(prepared).flatMap(({ bed, plants }) => {
+      const share = volumeShare(plants.filter(({ plant }) => plant.leaf !== 'herbaceous'), ({ plant }) => WEIGHTS[plant.leaf])
+      if (share === null || (share >= LEAST && share <= MOST)) return []
+      return [findingOf({ rule: 'evergreen-share', kind: 'note', placements: [], feature: bed.id, limit: share < LEAST ? LEAST : MOST, measured: { low: null, expected: share, high: null } })]
+    }),
+}
