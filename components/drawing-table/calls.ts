@@ -13,7 +13,8 @@ function placeOf({ problems = [] }: ErrorBody['error']): number | undefined {
   return typeof at === 'number' ? at : undefined
 }
 
-async function ask<T>(address: string, init?: RequestInit): Promise<Answer<T>> {
+/** One request whose answer is data, whatever goes wrong. */
+export async function ask<T>(address: string, init?: RequestInit): Promise<Answer<T>> {
   try {
     const response = await fetch(address, init)
     const body = (await response.json()) as T & Partial<ErrorBody>

@@ -12,6 +12,7 @@ import { createDesk, MemoryQueueStore, openDesk, type Desk, type SheetReport } f
 import { IdbQueueStore, lockWatch } from './editor/save-queue-idb'
 import { HelpDialog } from './help-dialog'
 import { PlantPicker } from './plant-picker'
+import { RoomPanel } from './room-panel'
 import { SaveNotices } from './save-notices'
 import { SidePanel, type TabName } from './side-panel'
 import { systemClock } from './system-clock'
@@ -84,6 +85,7 @@ export function DrawingTable(props: Props) {
   const page = useMemo(() => ({
     openHelp: () => setHelpOpen(true),
     openPlants: () => desk.editor.setTool({ kind: 'plant', plant: null }),
+    openRoom: () => desk.editor.setTool({ kind: 'room' }),
   }), [desk])
   return (
     <QueryClientProvider client={queries}>
@@ -94,7 +96,7 @@ export function DrawingTable(props: Props) {
           <div className="flex min-h-0 flex-1">
             <ToolRail />
             <DrawingFrame name={props.facade.name} />
-            <Beside tab={tab} onTab={setTab} />
+            <Beside facadeId={props.facade.id} tab={tab} onTab={setTab} />
           </div>
           <TimeBar />
         </div>
@@ -105,14 +107,14 @@ export function DrawingTable(props: Props) {
   )
 }
 
-/** The library while a plant is being chosen, else the words and numbers; the table needs more room than the sentences. */
-function Beside({ tab, onTab }: { tab: TabName; onTab: (tab: TabName) => void }) {
+/** The library while a plant is being chosen, what fits while one asks, else the words and numbers; the table needs more room than the sentences. */
+function Beside({ facadeId, tab, onTab }: { facadeId: string; tab: TabName; onTab: (tab: TabName) => void }) {
   const { editor } = useDesk()
   const { tool } = useEditorState()
-  const isPicking = tool.kind === 'plant'
+  const close = () => editor.setTool({ kind: 'move' })
   return (
-    <aside aria-label="Beside the drawing" className={`flex min-h-0 shrink-0 flex-col border-l border-rule ${!isPicking && tab === 'plants' ? 'w-[37rem]' : 'w-80 xl:w-96'}`}>
-      {isPicking ? <PlantPicker onClose={() => editor.setTool({ kind: 'move' })} /> : <SidePanel tab={tab} onTab={onTab} />}
+    <aside aria-label="Beside the drawing" className={`flex min-h-0 shrink-0 flex-col border-l border-rule ${tool.kind === 'move' && tab === 'plants' ? 'w-[37rem]' : 'w-80 xl:w-96'}`}>
+      {tool.kind === 'plant' ? <PlantPicker onClose={close} /> : tool.kind === 'room' ? <RoomPanel facadeId={facadeId} onClose={close} /> : <SidePanel tab={tab} onTab={onTab} />}
     </aside>
   )
 }

@@ -5,6 +5,7 @@ import { FindingList } from '@/components/findings/finding-list'
 import { useDesk, useEditorState } from './desk-context'
 import { PlantForm } from './plant-form'
 import { PlantsTable } from './plants-table'
+import { WaysOut } from './ways-out'
 
 export const TABS = ['findings', 'plants', 'plant'] as const
 export type TabName = (typeof TABS)[number]
@@ -23,7 +24,7 @@ export function SidePanel({ tab, onTab }: { tab: TabName; onTab: (tab: TabName) 
         <Tabs.Trigger value="plant" className={TAB}>This plant</Tabs.Trigger>
       </Tabs.List>
       <Tabs.Content value="findings" className={PAGE}>
-        <FindingList findings={report.findings} sheet={sheet} chosen={finding} selected={selected} onChoose={editor.selectFinding} />
+        <FindingList findings={report.findings} sheet={sheet} chosen={finding} selected={selected} onChoose={editor.selectFinding} renderChosen={(one) => <WaysOut finding={one} />} />
       </Tabs.Content>
       <Tabs.Content value="plants" className={PAGE}><PlantsTable /></Tabs.Content>
       <Tabs.Content value="plant" className={PAGE}><PlantForm /></Tabs.Content>

@@ -1,7 +1,7 @@
 'use client'
 /** Tools at the left hand, and how near one stands. */
 import { useDesk, useEditorState } from './desk-context'
-import { FartherIcon, FitIcon, HelpIcon, MoveIcon, NearerIcon, PickUpIcon, PlantIcon } from './icons'
+import { FartherIcon, FitIcon, HelpIcon, MoveIcon, NearerIcon, PickUpIcon, PlantIcon, RoomIcon } from './icons'
 import { BUTTON, CommandButton } from './parts'
 
 const TOOL = `${BUTTON} min-h-14 w-full flex-col gap-0.5 px-0.5 text-[13px] whitespace-nowrap leading-tight hover:bg-sheet aria-disabled:text-ink-soft`
@@ -29,6 +29,7 @@ export function ToolRail() {
           </ToolButton>
         </>
       ) : null}
+      <ToolButton isOn={tool.kind === 'room'} onPress={() => (tool.kind === 'room' ? editor.setTool({ kind: 'move' }) : page.openRoom())}><RoomIcon />What fits</ToolButton>
       <div className="mt-auto flex flex-col gap-1 border-t border-rule pt-1">
         <CommandButton id="zoom-in" className={TOOL}><NearerIcon />Nearer</CommandButton>
         <CommandButton id="zoom-out" className={TOOL}><FartherIcon />Farther</CommandButton>

@@ -1,7 +1,9 @@
 'use client'
 /** Findings in plain sentences, worst first. Choosing one shows it on the drawing. */
+import type { ReactNode } from 'react'
 import { formatLength } from '@/lib/measure'
-import { describe, yearsText, type Finding, type Sheet } from '@/lib/spacing'
+import { plantKeys } from '@/lib/sheet'
+import { describe, RULES, yearsText, type Finding, type Sheet } from '@/lib/spacing'
 import { KindMark, KIND_WORDS } from './kind-mark'
 
 interface Props {
@@ -12,17 +14,25 @@ interface Props {
   /** Placement selected on the drawing: what is said of it stands out. */
   selected: string | null
   onChoose: (key: string | null) => void
+  /** What can be done about the chosen one. */
+  renderChosen?: (finding: Finding) => ReactNode
 }
 
-/** Rules whose limit is a share of a length, not a length. */
-const SHARE_RULES = new Set(['crowding', 'number-view'])
+const MEASURES = new Map(RULES.map(({ meta }) => [meta.id, meta.measures]))
 
 const percent = (share: number) => `${Math.round(share * 100)} %`
 
 /** A limit or a measure in words, to the quarter inch. */
 function figure({ rule }: Finding, value: number | null): string | null {
   if (value === null) return null
-  return SHARE_RULES.has(rule) ? percent(value) : formatLength(Math.round(value * 4) / 4)
+  switch (MEASURES.get(rule)) {
+    case 'share':
+      return percent(value)
+    case 'count':
+      return String(value)
+    case undefined:
+      return formatLength(Math.round(value * 4) / 4)
+  }
 }
 
 function measuredText(finding: Finding): string | null {
@@ -30,13 +40,13 @@ function measuredText(finding: Finding): string | null {
   if (!measured) return null
   const [low, expected, high] = [measured.low, measured.expected, measured.high].map((value) => figure(finding, value))
   if (!expected) return null
-  return low && high ? `${low} / ${expected} / ${high}` : expected
+  return low && high ? [low, expected, high].join(', ') : expected
 }
 
 function factsOf(finding: Finding): [string, string][] {
   const facts: [string, string | null][] = [
     ['Limit', figure(finding, finding.limit)],
-    ['Low / expected / high', measuredText(finding)],
+    ['Low, expected, high', measuredText(finding)],
     ['Over by at most', finding.excess > 0 ? formatLength(Math.round(finding.excess * 4) / 4) : null],
     ['When', finding.year ? yearsText(finding.year) : null],
   ]
@@ -47,7 +57,7 @@ function Facts({ finding }: { finding: Finding }) {
   const facts = factsOf(finding)
   if (facts.length === 0) return null
   return (
-    <dl className="mt-2 grid grid-cols-[auto_1fr] gap-x-3 gap-y-0.5 text-sm">
+    <dl className="mt-2 grid grid-cols-[auto_1fr] gap-x-3 gap-y-0.5 text-sm xl:text-[15px]">
       {facts.map(([name, value]) => (
         <div key={name} className="col-span-2 grid grid-cols-subgrid">
           <dt className="text-ink-soft">{name}</dt>
@@ -58,7 +68,21 @@ function Facts({ finding }: { finding: Finding }) {
   )
 }
 
-function OneFinding({ finding, sheet, isChosen, isConcerned, onChoose }: { finding: Finding; sheet: Sheet; isChosen: boolean; isConcerned: boolean; onChoose: Props['onChoose'] }) {
+/** The drawing's letters of the plants a finding names. */
+function Keys({ letters }: { letters: readonly string[] }) {
+  return letters.map((letter) => (
+    <span key={letter} className="mr-1.5 inline-grid size-6 place-items-center rounded-full border border-ink align-text-bottom font-sans text-sm font-bold not-italic">{letter}</span>
+  ))
+}
+
+interface OneProps extends Pick<Props, 'onChoose' | 'sheet' | 'renderChosen'> {
+  finding: Finding
+  letters: readonly string[]
+  isChosen: boolean
+  isConcerned: boolean
+}
+
+function OneFinding({ finding, letters, sheet, isChosen, isConcerned, onChoose, renderChosen }: OneProps) {
   const { title, sentence, wayOut } = describe(finding, sheet)
   return (
     <li className={`border-b border-rule ${isChosen ? 'bg-sheet' : ''}`}>
@@ -70,25 +94,28 @@ function OneFinding({ finding, sheet, isChosen, isConcerned, onChoose }: { findi
       >
         <KindMark kind={finding.kind} />
         <span className="min-w-0">
-          <span className="botanical block text-lg leading-tight">{title}</span>
+          <span className="botanical block text-lg leading-tight"><Keys letters={letters} />{title}</span>
           <span className="block"><span className="font-bold">{KIND_WORDS[finding.kind]}.</span> {sentence}</span>
           {wayOut ? <span className="mt-1 block text-ink-soft">{wayOut}</span> : null}
         </span>
       </button>
-      {isChosen ? <div className="px-4 pb-3 pl-12"><Facts finding={finding} /></div> : null}
+      {isChosen ? <div className="px-4 pb-4 pl-12"><Facts finding={finding} />{renderChosen?.(finding)}</div> : null}
     </li>
   )
 }
 
 /** See `Props`. Says so when there is nothing to say. */
-export function FindingList({ findings, sheet, chosen, selected, onChoose }: Props) {
+export function FindingList({ findings, sheet, chosen, selected, onChoose, renderChosen }: Props) {
+  const keys = plantKeys(sheet)
+  const plantOf = new Map(sheet.placements.map(({ id, plant }) => [id, plant]))
+  const lettersOf = ({ placements }: Finding) => [...new Set(placements.flatMap((id) => keys.get(plantOf.get(id) ?? '') ?? []))]
   if (findings.length === 0) {
     return <p className="p-4">{sheet.placements.length === 0 ? 'What will outgrow its place is told here once something is planted.' : 'Nothing here will outgrow its place.'}</p>
   }
   return (
     <ul>
       {findings.map((finding) => (
-        <OneFinding key={finding.key} finding={finding} sheet={sheet} isChosen={finding.key === chosen} isConcerned={selected !== null && finding.placements.includes(selected)} onChoose={onChoose} />
+        <OneFinding key={finding.key} finding={finding} letters={lettersOf(finding)} sheet={sheet} renderChosen={renderChosen} isChosen={finding.key === chosen} isConcerned={selected !== null && finding.placements.includes(selected)} onChoose={onChoose} />
       ))}
     </ul>
   )

@@ -239,6 +239,8 @@ export interface RuleMeta {
   /** Short label for lists. */
   title: string
   settings: Setting[]
+  /** What limit and measured are, where they are no lengths. */
+  measures?: 'share' | 'count'
   /** Present for rules whose kind does not come from the bounds: the worst they say. A studio may switch them to off, note or risk. */
   fixedKind?: 'conflict' | 'risk' | 'note'
   sources: Source[]

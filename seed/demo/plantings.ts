@@ -19,10 +19,10 @@ const at = (botanical: string, [x, y, height, spread]: Spot, extra: Extra = {}):
 
 /** Finished: every plant keeps its place at its largest. */
 export const QUARRY_PLANTING: Planting[] = [
-  at("Berberis thunbergii f. atropurpurea 'Helmond Pillar'", [22, 40, 24, 9], { role: 'anchor' }),
+  at("Ilex glabra 'Shamrock'", [22, 40, 18, 18], { role: 'anchor' }),
   at("Hydrangea paniculata 'Ilvobo'", [72, 44, 15, 18]),
   at("Hydrangea paniculata 'Ilvobo'", [120, 44, 15, 18]),
-  at("Spiraea japonica 'Little Princess'", [168, 46, 12, 14]),
+  at("Buxus sempervirens 'Vardar Valley'", [168, 46, 12, 14]),
   at("Nepeta × faassenii 'Kit Cat'", [26, 84, 6, 9], { drift: 'catmint left' }),
   at("Nepeta × faassenii 'Kit Cat'", [50, 84, 6, 9], { drift: 'catmint left' }),
   at("Nepeta × faassenii 'Kit Cat'", [74, 84, 6, 9], { drift: 'catmint left' }),
@@ -31,8 +31,8 @@ export const QUARRY_PLANTING: Planting[] = [
   at("Coreopsis verticillata 'Zagreb'", [144, 86, 6, 8], { drift: 'tickseed' }),
   at("Abelia × grandiflora 'Rose Creek'", [296, 44, 15, 16]),
   at("Hydrangea paniculata 'Ilvobo'", [348, 44, 15, 18]),
-  at("Hydrangea paniculata 'Ilvobo'", [398, 44, 15, 18]),
-  at("Clethra alnifolia 'Ruby Spice'", [446, 50, 24, 18], { role: 'anchor' }),
+  at("Ilex glabra 'Shamrock'", [402, 44, 15, 18]),
+  at("Clethra alnifolia 'Ruby Spice'", [470, 46, 24, 18], { role: 'anchor' }),
   at("Heuchera 'Plum Pudding'", [280, 86, 5, 8], { drift: 'alumroot' }),
   at("Heuchera 'Plum Pudding'", [298, 86, 5, 8], { drift: 'alumroot' }),
   at("Heuchera 'Plum Pudding'", [316, 86, 5, 8], { drift: 'alumroot' }),

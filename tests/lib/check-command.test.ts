@@ -4,7 +4,7 @@ import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { afterAll, beforeAll, describe, expect, test } from 'vitest'
-import { check, ENGINE_VERSION, type Sheet } from '@/lib/spacing'
+import { check, ENGINE_VERSION, waysOut, type Finding, type Sheet } from '@/lib/spacing'
 
 const GOLDEN = 'tests/golden/kitchen-window.json'
 const golden = JSON.parse(readFileSync(GOLDEN, 'utf8')) as Sheet
@@ -45,8 +45,15 @@ describe('a sheet it can read', () => {
   })
 
   test('without findings says so', () => {
-    const { status, stdout } = run(fileOf('empty.json', { ...golden, placements: [] }))
+    const { status, stdout } = run(fileOf('empty.json', { ...golden, placements: [], beds: [], facade: { ...golden.facade, fall: 0.06 } }))
     expect([status, stdout]).toEqual([0, 'Nothing to say: every plant keeps its place.\n'])
+  })
+
+  test('asked for ways out it says one below each finding, or that there is none', () => {
+    const { stdout } = run('--ways-out', fileOf('wall-out.json', crowdedWall))
+    expect(stdout).toMatch(/^Conflict {2}Exemplum rotundum: .+\n {10}(Move|Keep|Swap|No way out)/m)
+    const { findings } = JSON.parse(run('--ways-out', '--json', fileOf('wall-json.json', crowdedWall)).stdout) as { findings: Finding[] }
+    expect(findings[0]!.remedies).toEqual(waysOut(crowdedWall, check(crowdedWall).findings[0]!))
   })
 
   test('as JSON it is the report itself, wherever the flag stands, with the same ending', () => {

@@ -44,6 +44,7 @@ function bodyOf({ body }: RouteEndpoint): unknown {
   if (body === 'edits') return { base: 0, editor: 'test', edits: [put(1, placementAt('p1', 60))] }
   if (body === 'import') return { text: csvTemplate(), mode: 'good-rows' }
   if (body === 'preview') return { text: csvTemplate() }
+  if (body === 'spot') return { x: 120, y: 40 }
   return {}
 }
 

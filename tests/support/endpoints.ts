@@ -20,7 +20,7 @@ export interface RouteEndpoint {
   file: string
   method: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE'
   path: (ids: Ids) => string
-  body?: 'sheet' | 'edits' | 'import' | 'preview'
+  body?: 'sheet' | 'edits' | 'import' | 'preview' | 'spot'
   status: For<number>
   /** Asked by the owner's browser, from a page of another site. */
   crossSite: number
@@ -63,6 +63,8 @@ export const ROUTES: RouteEndpoint[] = [
   { file: 'app/api/facades/[id]/findings/route.ts', method: 'GET', path: facade('findings'), status: readByMembers, crossSite: 200 },
   { file: 'app/api/facades/[id]/plant-list/route.ts', method: 'GET', path: facade('plant-list?format=csv'), status: readByMembers, crossSite: 200 },
   { file: 'app/api/facades/[id]/edits/route.ts', method: 'POST', path: facade('edits'), body: 'edits', status: status([200, 200, 403, 403], { stranger: 404 }), crossSite: 403 },
+  { file: 'app/api/facades/[id]/fits/route.ts', method: 'POST', path: facade('fits'), body: 'spot', status: readByMembers, crossSite: 403 },
+  { file: 'app/api/plants/library/route.ts', method: 'GET', path: () => '/api/plants/library', status: openToMembers, crossSite: 200 },
   { file: 'app/api/plants/route.ts', method: 'GET', path: () => '/api/plants?q=ilex', status: openToMembers, crossSite: 200 },
   { file: 'app/api/plants/[id]/route.ts', method: 'GET', path: ({ plantId }) => `/api/plants/${plantId}`, status: readByMembers, crossSite: 200 },
   { file: 'app/api/plants/import/route.ts', method: 'POST', path: () => '/api/plants/import', body: 'import', status: madeByEditors, crossSite: 403 },

@@ -154,6 +154,11 @@ export class Pointers {
       this.carryTo(from)
       return editor.commitMove()
     }
+    if (tool.kind === 'room') {
+      const at = toScene(viewport.view, from)
+      if (axesAt(this.scene(), at) === 'both') editor.setSpot(Math.round(at.x), Math.round(this.scene().outAt(at.y)))
+      return
+    }
     if (tool.kind === 'plant' && tool.plant) {
       const at = toScene(viewport.view, from)
       if (axesAt(this.scene(), at) === 'both') editor.add(tool.plant, Math.round(at.x), Math.round(this.scene().outAt(at.y)))

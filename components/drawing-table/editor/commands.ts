@@ -6,6 +6,7 @@ import { neighbourOf } from './placing'
 export interface Surroundings {
   openHelp: () => void
   openPlants: () => void
+  openRoom: () => void
 }
 
 export interface CommandContext extends Desk {
@@ -94,7 +95,7 @@ const EDITING: readonly Command[] = [
 /** Puts back what is held; else puts the plant in hand away; else lets go of what is selected. */
 function escape({ editor }: CommandContext): void {
   if (editor.moving) editor.cancelMove()
-  else if (editor.getSnapshot().tool.kind === 'plant') editor.setTool({ kind: 'move' })
+  else if (editor.getSnapshot().tool.kind !== 'move') editor.setTool({ kind: 'move' })
   else editor.select(null)
 }
 
@@ -102,9 +103,10 @@ const LOOKING: readonly Command[] = [
   along(1), along(-1),
   {
     id: 'escape', label: 'Put back, or let go', keyText: 'Escape', strokes: [{ key: 'Escape' }], group: 'Move',
-    when: ({ editor }) => editor.moving !== null || editor.getSnapshot().tool.kind === 'plant' || editor.getSnapshot().selected !== null || editor.getSnapshot().finding !== null,
+    when: ({ editor }) => editor.moving !== null || editor.getSnapshot().tool.kind !== 'move' || editor.getSnapshot().selected !== null || editor.getSnapshot().finding !== null,
     run: escape,
   },
+  { id: 'room', label: 'Ask what fits at a spot', keyText: 'F', strokes: [{ key: 'f' }], group: 'Look', when: always, run: ({ page }) => page.openRoom() },
   { id: 'zoom-in', label: 'Nearer', keyText: '+', strokes: [{ key: '+' }, { key: '=' }], group: 'Look', when: always, run: ({ viewport }) => viewport.zoom(ZOOM_STEP) },
   { id: 'zoom-out', label: 'Farther', keyText: '-', strokes: [{ key: '-' }], group: 'Look', when: always, run: ({ viewport }) => viewport.zoom(1 / ZOOM_STEP) },
   { id: 'fit', label: 'Whole sheet', keyText: '0', strokes: [{ key: '0' }], group: 'Look', when: always, run: ({ viewport }) => viewport.fit() },

@@ -5,7 +5,7 @@
  */
 import type { Plant } from '@/lib/plants'
 import { applyEdits, placementSchema, targetOf, type Edit } from '@/lib/sheet'
-import { check, type Bound, type Finding, type Placement, type Sheet } from '@/lib/spacing'
+import { changedPlacements, check, type Bound, type Finding, type Placement, type Point, type Remedy, type Sheet, type Size } from '@/lib/spacing'
 import { DragSession, type Axes, type Grid } from './drag-session'
 import { History, inversesOf } from './history'
 import { Observable } from './observable'
@@ -17,8 +17,8 @@ import { keyOfEdit, thingOn } from './things'
 export const LAST_YEAR = 20
 export const TENTH_SUMMER = 10
 
-/** move: pointers select and drag. plant: a tap in plan sets this plant there. */
-export type Tool = { kind: 'move' } | { kind: 'plant'; plant: Plant | null }
+/** move: pointers select and drag. plant: a tap in plan sets this plant there. room: a tap in plan asks what fits there. */
+export type Tool = { kind: 'move' } | { kind: 'plant'; plant: Plant | null } | { kind: 'room' }
 
 export interface EditorState {
   sheet: Sheet
@@ -28,6 +28,9 @@ export interface EditorState {
   /** Key of a finding. */
   finding: string | null
   tool: Tool
+  /** Where one asks what fits, and the largest crown it holds once that is known. */
+  spot: Point | null
+  room: Size | null
   /** Picked up by a tap: the next tap says where it goes. */
   isCarried: boolean
   /** Years since planting, 0 to 20. */
@@ -70,7 +73,7 @@ export class Editor extends Observable<EditorState> {
 
   constructor(private readonly options: Options) {
     super({
-      sheet: options.sheet, report: options.report, selected: null, finding: null, tool: { kind: 'move' }, isCarried: false,
+      sheet: options.sheet, report: options.report, selected: null, finding: null, tool: { kind: 'move' }, spot: null, room: null, isCarried: false,
       year: TENTH_SUMMER, bound: 'expected', month: JULY, grid: 1, undoLabel: null, redoLabel: null, said: '',
     })
     this.canEdit = options.canEdit
@@ -111,8 +114,13 @@ export class Editor extends Observable<EditorState> {
 
   readonly setTool = (tool: Tool): void => {
     this.cancelMove()
-    this.set({ tool: this.canEdit ? tool : { kind: 'move' } })
+    this.set({ tool: this.canEdit || tool.kind === 'room' ? tool : { kind: 'move' }, spot: null, room: null })
   }
+
+  /** Asks what fits at a point of the plan. */
+  readonly setSpot = (x: number, y: number): void => this.set({ spot: { x, y }, room: null })
+  /** Shows the largest crown the spot holds. */
+  readonly showRoom = (room: Size | null): void => this.set({ room: this.getSnapshot().spot ? room : null })
 
   // -- changing -----------------------------------------------------------------------------------------------
 
@@ -174,6 +182,14 @@ export class Editor extends Observable<EditorState> {
     if (this.put(placement, `${plant.common || plant.botanical} planted`) !== null) return null
     this.select(placement.id)
     return placement.id
+  }
+
+  /** Applies a way out: one gesture, whatever it changes. `plant` is the one swapped in. */
+  readonly applyRemedy = (remedy: Remedy, label: string, plant?: Plant): void => {
+    if (plant) this.plants.set(plant.id, plant)
+    this.cancelMove()
+    const changed = changedPlacements(this.getSnapshot().sheet, remedy, plant)
+    this.make(changed.map((value) => ({ id: this.options.newId(), op: 'put', kind: 'placement', value })), label)
   }
 
   readonly remove = (id: string): void => {

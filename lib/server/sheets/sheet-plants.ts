@@ -1,4 +1,4 @@
-import { and, eq, inArray, isNull, or } from 'drizzle-orm'
+import { and, eq, inArray, isNull, or, sql } from 'drizzle-orm'
 import type { Db } from '@/db/open'
 import { plants } from '@/db/schema'
 import type { Plant } from '@/lib/plants'
@@ -13,12 +13,18 @@ const SHEET_COLUMNS = {
   thorns: plants.thorns, invasive: plants.invasive, native: plants.native, prune: plants.prune,
 }
 
+const isVisibleTo = (studioId: string) => or(isNull(plants.studioId), eq(plants.studioId, studioId))
+
+/** Every plant the studio may use (shared ones and its own), by botanical name. */
+export function libraryPlants(db: Db, studioId: string): Plant[] {
+  return db.select(SHEET_COLUMNS).from(plants).where(isVisibleTo(studioId)).orderBy(sql`${plants.botanical} collate nocase`, plants.id).all()
+}
+
 /** Plants by id that the studio may use (shared ones and its own), in the order asked for; unknown ids are left out. */
 export function sheetPlants(db: Db, studioId: string, ids: Iterable<string>): Plant[] {
   const wanted = [...new Set(ids)]
   if (wanted.length === 0) return []
-  const isVisible = or(isNull(plants.studioId), eq(plants.studioId, studioId))
-  const rows = db.select(SHEET_COLUMNS).from(plants).where(and(inArray(plants.id, wanted), isVisible)).all()
+  const rows = db.select(SHEET_COLUMNS).from(plants).where(and(inArray(plants.id, wanted), isVisibleTo(studioId))).all()
   const byId = new Map<string, Plant>(rows.map((row) => [row.id, row]))
   return wanted.flatMap((id) => byId.get(id) ?? [])
 }

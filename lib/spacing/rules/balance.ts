@@ -25,6 +25,7 @@ export const balance: Rule = {
     id: 'balance',
     title: 'Balance',
     question: 'Does one side of the bed outweigh the other?',
+    measures: 'share',
     settings: [],
     fixedKind: 'note',
     sources: [{ publisher: 'Common practice', title: 'Visual weight about the middle of a bed', address: null, known: 'practice' }],

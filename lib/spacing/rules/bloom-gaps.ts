@@ -8,6 +8,7 @@ export const bloomGaps: Rule = {
     id: 'bloom-gaps',
     title: 'Gaps in flower',
     question: 'Does something flower from spring to fall?',
+    measures: 'count',
     settings: [],
     fixedKind: 'note',
     sources: [{ publisher: 'Common practice', title: 'Something in flower from April to October', address: null, known: 'practice' }],

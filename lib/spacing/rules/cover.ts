@@ -14,6 +14,7 @@ export const cover: Rule = {
     id: 'cover',
     title: 'Cover',
     question: 'Will the bed close?',
+    measures: 'share',
     settings: [],
     fixedKind: 'note',
     sources: [{ publisher: 'Common practice', title: 'A grown bed covers most of its soil', address: null, known: 'practice' }],

@@ -17,6 +17,7 @@ export const crowding: Rule = {
     id: 'crowding',
     title: 'Crowding',
     question: 'Will it swallow its neighbour?',
+    measures: 'share',
     settings: [
       { name: 'crowding.unlike', label: 'Overlap allowed between unlike plants', default: 0.1, min: 0, max: 0.5, unit: 'share' },
       { name: 'crowding.drift', label: 'Overlap allowed within one drift', default: 0.25, min: 0, max: 0.75, unit: 'share' },

@@ -14,6 +14,7 @@ export const evergreenShare: Rule = {
     id: 'evergreen-share',
     title: 'Evergreens',
     question: 'Is there enough green in winter, and not too much of it?',
+    measures: 'share',
     settings: [],
     fixedKind: 'note',
     sources: [{ publisher: 'Common practice', title: 'A third to two thirds of the woody plants evergreen', address: null, known: 'practice' }],

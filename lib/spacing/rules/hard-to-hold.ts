@@ -22,6 +22,7 @@ export const hardToHold: Rule = {
     id: 'hard-to-hold',
     title: 'Hard to hold',
     question: 'Can shears hold it so small?',
+    measures: 'share',
     settings: [],
     fixedKind: 'risk',
     sources: [{ publisher: 'Common practice', title: 'A plant held much below its natural size is the wrong plant', address: null, known: 'practice' }],

@@ -10,6 +10,7 @@ export const nativeShare: Rule = {
     id: 'native-share',
     title: 'Native plants',
     question: 'Are there native plants enough to feed birds?',
+    measures: 'share',
     settings: [],
     fixedKind: 'note',
     sources: [{ publisher: 'Proceedings of the National Academy of Sciences, 2018', title: 'Nonnative plants reduce population growth of an insectivorous bird', address: 'https://doi.org/10.1073/pnas.1809259115', known: 'read' }],

@@ -46,6 +46,7 @@ export const numberView: Rule = {
     id: 'number-view',
     title: 'House number and light',
     question: 'Can the house number and the entry light be seen?',
+    measures: 'share',
     settings: [],
     sources: [{ publisher: 'International Code Council', title: 'International Residential Code R319, Fire Code 505: address plainly visible from the street (as quoted)', address: 'http://www.ibc-wiki.com/section-501/', known: 'read' }],
     notes: 'Seen square-on, from plants up to 20 ft in front of it. Local code decides.',

@@ -12,6 +12,7 @@ export const oddDrift: Rule = {
     id: 'odd-drift',
     title: 'Odd numbers',
     question: 'Is the drift an odd number?',
+    measures: 'count',
     settings: [],
     fixedKind: 'note',
     sources: [{ publisher: 'Sustainable Technologies Evaluation Program, Toronto area conservation authorities', title: 'Planting design: groups of 3, 5 or 7 of one kind', address: 'https://wikidev.sustainabletechnologies.ca/index.php?diff=9742&mobileaction=toggle_view_mobile&title=Planting_design', known: 'read' }],

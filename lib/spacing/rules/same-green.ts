@@ -27,6 +27,7 @@ export const sameGreen: Rule = {
     id: 'same-green',
     title: 'All one green',
     question: 'Do neighbours set each other off?',
+    measures: 'count',
     settings: [],
     fixedKind: 'note',
     sources: [{ publisher: 'Common practice', title: 'Neighbours differ in color or texture', address: null, known: 'practice' }],

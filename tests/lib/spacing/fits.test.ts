@@ -2,14 +2,14 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import type { Plant } from '@/lib/plants/types'
-import { check, describeMiss, fitsHere, prepare, type Placement, type Sheet } from '@/lib/spacing'
+import { check, describeMiss, fitsHere, prepare, RULES, type Placement, type Sheet } from '@/lib/spacing'
 import { anySheet, grown, makePlacement, makePlant, makeSheet, makeWalk, makeWindow } from '../../support/sheets'
 
 const NEW = 'new'
 const withPlant = (sheet: Sheet, plant: Plant, placement: Placement): Sheet => ({ ...sheet, plants: [...sheet.plants.filter(({ id }) => id !== plant.id), plant], placements: [...sheet.placements, placement] })
 const isBad = ({ kind }: { kind: string }) => kind === 'conflict' || kind === 'risk'
 /** Rules that fitting asks: those of one placement, of neighbours, and of the site. */
-const ASKED = new Set(['sill', 'walk-edge', 'wall-gap', 'gutter', 'outside-bed', 'crowding', 'layer-order', 'hardiness', 'light'])
+const ASKED = new Set(RULES.filter(({ scope }) => scope !== 'sheet').map(({ meta }) => meta.id))
 const against = (sheet: Sheet) => check(sheet).findings.filter((finding) => isBad(finding) && ASKED.has(finding.rule) && finding.placements.includes(NEW))
 /** The crown as a plant that is planted full-grown. */
 const asCrown = (height: number, spread: number) => ({ plant: grown(height, spread, { id: 'crown', light: [], zoneMin: null, zoneMax: null }), planted: { height, spread } })
