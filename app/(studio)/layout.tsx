@@ -16,6 +16,7 @@ export default async function StudioLayout({ children }: { children: ReactNode }
     { href: '/projects', label: 'Projects' },
     ...(can(role, 'review:queue') ? [{ href: '/review', label: 'Review' }] : []),
     { href: '/plants', label: 'Plants' },
+    { href: '/standards', label: 'Standards' },
     { href: '/account', label: 'Account' },
   ]
   return (

@@ -62,6 +62,8 @@ export const facades = sqliteTable(
     seq: integer('seq').notNull().default(0),
     /** Engine version that made the findings kept beside it; '' before the first check. */
     engine: text('engine').notNull().default(''),
+    /** What the studio had set when they were made. */
+    standards: json<Record<string, number | string>>('standards').default({}),
     createdAt: createdAt(),
     updatedAt: integer('updated_at').notNull(),
   },

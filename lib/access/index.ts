@@ -17,6 +17,8 @@ const TABLE = {
   'sheet:check': ['owner', 'designer', 'reviewer', 'estimator'],
   'review:queue': ['owner', 'designer', 'reviewer'],
   'takeoff:read': ['owner', 'designer', 'reviewer', 'estimator'],
+  'standards:read': ['owner', 'designer', 'reviewer', 'estimator'],
+  'standards:edit': ['owner'],
   'plant:read': ['owner', 'designer', 'reviewer', 'estimator'],
   'plant:edit': ['owner', 'designer'],
   'client-link:create': ['owner', 'designer'],

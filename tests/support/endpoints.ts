@@ -87,6 +87,7 @@ export const PAGES: PageEndpoint[] = [
   { file: 'app/(studio)/projects/page.tsx', path: () => '/projects', outcome: members() },
   { file: 'app/(studio)/projects/new/page.tsx', path: () => '/projects/new', outcome: members({ reviewer: '/projects', estimator: '/projects' }) },
   { file: 'app/(studio)/projects/[projectId]/page.tsx', path: ({ projectId }) => `/projects/${projectId}`, outcome: ofTheStudio() },
+  { file: 'app/(studio)/standards/page.tsx', path: () => '/standards', outcome: members() },
   { file: 'app/(studio)/review/page.tsx', path: () => '/review', outcome: members({ estimator: '/projects' }) },
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/plant-list/page.tsx', path: drawing('/plant-list'), outcome: ofTheStudio() },
   { file: 'app/(studio)/projects/[projectId]/facades/[facadeId]/page.tsx', path: drawing(), outcome: ofTheStudio() },
@@ -110,6 +111,7 @@ export const ACTIONS: ActionEndpoint[] = [
       removeFacadeAction: 'project:edit', createClientLinkAction: 'client-link:create', revokeClientLinkAction: 'client-link:create',
     },
   },
+  { file: 'app/(studio)/standards/actions.ts', actions: { saveStandardsAction: 'standards:edit' } },
   { file: 'app/(studio)/plants/actions.ts', actions: { createPlantAction: 'plant:edit', savePlantAction: 'plant:edit', removePlantAction: 'plant:edit' } },
   { file: 'app/(public)/c/[token]/open-garden.ts', actions: { openGarden: null } },
 ]

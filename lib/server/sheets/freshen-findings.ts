@@ -9,7 +9,8 @@ import { storeFindings } from './store-findings'
 /** Checks a facade as it stands and keeps the findings. Part of the caller's transaction. */
 export function recheck(db: Db, found: FoundFacade): void {
   const { id: facadeId, studioId } = found.facade
-  storeFindings({ db, facadeId, studioId }, check(readSheet(db, found)))
+  const sheet = readSheet(db, found)
+  storeFindings({ db, facadeId, studioId, standards: sheet.standards ?? {} }, check(sheet))
 }
 
 /** Checks again the facades of a studio that were never checked, or by another version of the engine. */

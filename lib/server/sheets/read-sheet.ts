@@ -44,7 +44,8 @@ function placementOf(row: typeof placements.$inferSelect): Placement {
   }
 }
 
-function standardsOf(db: Db, studioId: string): Record<string, number | string> {
+/** What a studio has set otherwise than the rules do, by name. */
+export function standardsOf(db: Db, studioId: string): Record<string, number | string> {
   const rows = db.select().from(standards).where(eq(standards.studioId, studioId)).orderBy(asc(standards.name)).all()
   return Object.fromEntries(rows.map(({ name, number, kind }) => [name, number ?? kind ?? '']))
 }

@@ -113,7 +113,7 @@ function save(context: Context, found: FoundFacade, batch: Batch): { seq: number
   writeThings(where, sheet, edits)
   writeLog(context, facade, batch.editor, edits)
   const report = check(sheet)
-  storeFindings(where, report)
+  storeFindings({ ...where, standards: sheet.standards ?? {} }, report)
   const seq = facade.seq + 1
   db.update(facades).set({ seq, updatedAt: now }).where(eq(facades.id, facade.id)).run()
   db.update(projects).set({ updatedAt: now }).where(eq(projects.id, project.id)).run()

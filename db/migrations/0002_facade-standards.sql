@@ -1,0 +1,1 @@
+ALTER TABLE `facades` ADD `standards` text DEFAULT '{}' NOT NULL;
