@@ -113,7 +113,7 @@ function Beside({ facadeId, tab, onTab }: { facadeId: string; tab: TabName; onTa
   const { tool } = useEditorState()
   const close = () => editor.setTool({ kind: 'move' })
   return (
-    <aside aria-label="Beside the drawing" className={`flex min-h-0 shrink-0 flex-col border-l border-rule ${tool.kind === 'move' && tab === 'plants' ? 'w-[37rem]' : 'w-80 xl:w-96'}`}>
+    <aside aria-label="Beside the drawing" className={`flex min-h-0 shrink-0 flex-col border-l border-rule ${tool.kind === 'move' && tab === 'plants' ? 'w-[37rem]' : 'w-88 xl:w-96'}`}>
       {tool.kind === 'plant' ? <PlantPicker onClose={close} /> : tool.kind === 'room' ? <RoomPanel facadeId={facadeId} onClose={close} /> : <SidePanel tab={tab} onTab={onTab} />}
     </aside>
   )

@@ -4,10 +4,15 @@ import { useQuery } from '@tanstack/react-query'
 import type { Plant } from '@/lib/plants'
 import { ask } from './calls'
 
-async function readLibrary(): Promise<Plant[]> {
-  const answer = await ask<{ plants: Plant[] }>('/api/plants/library')
+export interface Library {
+  plants: Plant[]
+  fruits: Record<string, { color: string; months: number[] }>
+}
+
+async function readLibrary(): Promise<Library> {
+  const answer = await ask<Library>('/api/plants/library')
   if (!answer.ok) throw new Error(answer.message)
-  return answer.value.plants
+  return answer.value
 }
 
 export function useLibrary() {

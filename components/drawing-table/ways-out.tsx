@@ -29,7 +29,7 @@ export function WaysOut({ finding }: { finding: Finding }) {
   const { sheet } = useEditorState()
   const library = useLibrary()
   // Without the library there is still moving and clipping, and the sheet's own plants to swap in.
-  const plants = library.data ?? (library.isError ? sheet.plants : null)
+  const plants = library.data?.plants ?? (library.isError ? sheet.plants : null)
   const remedies = useWaysOut(finding, sheet, plants)
   if (!editor.canEdit || (finding.kind !== 'conflict' && finding.kind !== 'risk')) return null
   if (finding.placements.length === 0) return <p className="mt-2 text-ink-soft">This is about the house and its ground: no plant mends it.</p>

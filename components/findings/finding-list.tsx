@@ -3,7 +3,7 @@
 import type { ReactNode } from 'react'
 import { formatLength } from '@/lib/measure'
 import { plantKeys } from '@/lib/sheet'
-import { describe, RULES, yearsText, type Finding, type Sheet } from '@/lib/spacing'
+import { describe, RULES, type Finding, type Sheet } from '@/lib/spacing'
 import { KindMark, KIND_WORDS } from './kind-mark'
 
 interface Props {
@@ -48,7 +48,6 @@ function factsOf(finding: Finding): [string, string][] {
     ['Limit', figure(finding, finding.limit)],
     ['Low, expected, high', measuredText(finding)],
     ['Over by at most', finding.excess > 0 ? formatLength(Math.round(finding.excess * 4) / 4) : null],
-    ['When', finding.year ? yearsText(finding.year) : null],
   ]
   return facts.filter((fact): fact is [string, string] => fact[1] !== null)
 }

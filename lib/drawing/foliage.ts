@@ -17,6 +17,11 @@ const BLOOM: Record<Plant['bloomColor'], Ink[]> = {
   green: ['bloom-green'], blue: ['bloom-blue'], purple: ['bloom-purple'], multi: ['bloom-pink', 'bloom-yellow', 'bloom-purple'], '': [],
 }
 
+const FRUIT: Record<string, Ink> = { red: 'bloom-red', orange: 'bloom-orange', yellow: 'bloom-yellow', white: 'bloom-white', blue: 'bloom-blue', purple: 'bloom-purple', pink: 'bloom-pink', green: 'bloom-green', black: 'ink', brown: 'bark' }
+
+/** The ink of a fruit colour as the library names it; soft ink for others. */
+export const fruitInk = (color: string): Ink => FRUIT[color] ?? 'ink-soft'
+
 const isEvergreen = ({ leaf }: Plant) => leaf === 'broadleaf-evergreen' || leaf === 'needle-evergreen' || leaf === 'scale-evergreen'
 const isWinter = (month: number) => month <= 3 || month === 12
 

@@ -6,7 +6,7 @@ import { facingWords, northArrow, scaleBar, titleOf, walkNames } from './furnitu
 import { cutWall, dripLine, drawBed, drawWalk } from './grounds'
 import { grow, type Grown } from './grown'
 import { drawFinding, drawSelected } from './highlight'
-import { drawSpot } from './spot'
+import { drawPockets, drawSpot } from './spot'
 import { drawHouse, drawSoil } from './house'
 import { KEY_STRIP_PX, setKeys } from './keys'
 import { createLabeler, type Labeler } from './labels'
@@ -86,7 +86,8 @@ function add(scene: Scene, list: 'limits' | 'labels' | 'highlight', shapes: { el
 }
 
 function addHighlights(scene: Scene, { options, layout, plants, labelers }: Work): void {
-  const { sheet, selected, finding, spot } = options
+  const { sheet, selected, finding, spot, pockets } = options
+  if (pockets) add(scene, 'highlight', { elevation: [], plan: drawPockets(pockets, scene) })
   if (spot) add(scene, 'highlight', drawSpot(spot, sheet.facade, scene))
   for (const id of new Set([selected, ...(finding?.placements ?? [])])) {
     const placement = id ? sheet.placements.find((one) => one.id === id) : undefined

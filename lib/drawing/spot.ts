@@ -1,5 +1,5 @@
 /** A spot one asks about: a mark in plan, and the largest crown it holds as an outline in both views. */
-import { groundAt, silhouette, type Crown, type Facade, type Point, type Size } from '../spacing'
+import { groundAt, silhouette, type Crown, type Facade, type Pocket, type Point, type Size } from '../spacing'
 import { circle, path, polygon, segment } from './path'
 import type { Scene, Shape } from './types'
 
@@ -26,4 +26,12 @@ export function drawSpot(spot: Point & { room: Size | null }, facade: Facade, sc
     elevation: [path(polygon(silhouette(crown).map((point) => ({ x: point.x, y: scene.elevationY(point.z) }))), outline)],
     plan: [path(circle(at.x, at.y, room.spread / 2), outline), ...mark],
   }
+}
+
+/** Pockets in plan: dashed rings, each with the number of annuals it takes. */
+export function drawPockets(pockets: readonly Pocket[], { planY }: Pick<Scene, 'planY'>): Shape[] {
+  return pockets.flatMap(({ x, y, diameter, annuals }): Shape[] => [
+    path(circle(x, planY(y), diameter / 2), { stroke: 'ink-soft', strokePx: 1.6, dashPx: [3, 4] }),
+    { kind: 'text', text: String(annuals), x, y: planY(y), sizePx: 13, font: 'mono', ink: 'ink', anchor: 'middle', bold: true, halo: true },
+  ])
 }

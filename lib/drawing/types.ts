@@ -3,7 +3,7 @@
  * below, sharing x. Scene coordinates are inches, x to the right as on the facade, y DOWN. What people must be
  * able to read or touch (stroke widths, text, marks, dashes) is in screen pixels, constant under zoom.
  */
-import type { Bound, Finding, Point, Sheet, Size } from '../spacing'
+import type { Bound, Finding, Pocket, Point, Sheet, Size } from '../spacing'
 import type { Ink } from './palette'
 
 export interface Box {
@@ -127,6 +127,8 @@ export interface SceneOptions {
   finding?: Finding | null
   /** A point of the plan that is asked about, and the largest crown it holds where that is known. */
   spot?: (Point & { room: Size | null }) | null
+  /** Empty circles of the plan, with the annuals they take. */
+  pockets?: readonly Pocket[]
   show?: Show
 }
 

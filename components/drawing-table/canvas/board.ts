@@ -79,8 +79,8 @@ export class Board {
 
   private build(pxPerInch: number | undefined): Scene {
     const { editor } = this.desk
-    const { sheet, year, bound, month, selected, finding, spot, room } = editor.getSnapshot()
-    return buildScene({ sheet, year, bound, month, selected, finding: editor.finding(finding), spot: spot && { ...spot, room }, ...(pxPerInch && { pxPerInch }) })
+    const { sheet, year, bound, month, selected, finding, spot, room, pockets } = editor.getSnapshot()
+    return buildScene({ sheet, year, bound, month, selected, finding: editor.finding(finding), spot: spot && { ...spot, room }, pockets, ...(pxPerInch && { pxPerInch }) })
   }
 
   /** Many changes in one frame are drawn once. */

@@ -5,7 +5,7 @@
  */
 import type { Plant } from '@/lib/plants'
 import { applyEdits, placementSchema, targetOf, type Edit } from '@/lib/sheet'
-import { changedPlacements, check, type Bound, type Finding, type Placement, type Point, type Remedy, type Sheet, type Size } from '@/lib/spacing'
+import { changedPlacements, check, type Bound, type Finding, type Placement, type Pocket, type Point, type Remedy, type Sheet, type Size } from '@/lib/spacing'
 import { DragSession, type Axes, type Grid } from './drag-session'
 import { History, inversesOf } from './history'
 import { Observable } from './observable'
@@ -31,6 +31,8 @@ export interface EditorState {
   /** Where one asks what fits, and the largest crown it holds once that is known. */
   spot: Point | null
   room: Size | null
+  /** Empty circles to draw on the plan. */
+  pockets: readonly Pocket[]
   /** Picked up by a tap: the next tap says where it goes. */
   isCarried: boolean
   /** Years since planting, 0 to 20. */
@@ -73,7 +75,7 @@ export class Editor extends Observable<EditorState> {
 
   constructor(private readonly options: Options) {
     super({
-      sheet: options.sheet, report: options.report, selected: null, finding: null, tool: { kind: 'move' }, spot: null, room: null, isCarried: false,
+      sheet: options.sheet, report: options.report, selected: null, finding: null, tool: { kind: 'move' }, spot: null, room: null, pockets: [], isCarried: false,
       year: TENTH_SUMMER, bound: 'expected', month: JULY, grid: 1, undoLabel: null, redoLabel: null, said: '',
     })
     this.canEdit = options.canEdit
@@ -114,11 +116,12 @@ export class Editor extends Observable<EditorState> {
 
   readonly setTool = (tool: Tool): void => {
     this.cancelMove()
-    this.set({ tool: this.canEdit || tool.kind === 'room' ? tool : { kind: 'move' }, spot: null, room: null })
+    this.set({ tool: this.canEdit || tool.kind === 'room' ? tool : { kind: 'move' }, spot: null, room: null, ...(tool.kind === 'room' && { selected: null, finding: null }) })
   }
 
   /** Asks what fits at a point of the plan. */
   readonly setSpot = (x: number, y: number): void => this.set({ spot: { x, y }, room: null })
+  readonly showPockets = (pockets: readonly Pocket[]): void => this.set({ pockets })
   /** Shows the largest crown the spot holds. */
   readonly showRoom = (room: Size | null): void => this.set({ room: this.getSnapshot().spot ? room : null })
 

@@ -20,6 +20,12 @@ export function libraryPlants(db: Db, studioId: string): Plant[] {
   return db.select(SHEET_COLUMNS).from(plants).where(isVisibleTo(studioId)).orderBy(sql`${plants.botanical} collate nocase`, plants.id).all()
 }
 
+/** Colour and months of fruit by plant id; plants without fruit of note are left out. */
+export function libraryFruits(db: Db, studioId: string): Record<string, { color: string; months: number[] }> {
+  const rows = db.select({ id: plants.id, color: plants.fruitColor, months: plants.fruitMonths }).from(plants).where(isVisibleTo(studioId)).all()
+  return Object.fromEntries(rows.filter(({ months }) => months.length > 0).map(({ id, color, months }) => [id, { color, months }]))
+}
+
 /** Plants by id that the studio may use (shared ones and its own), in the order asked for; unknown ids are left out. */
 export function sheetPlants(db: Db, studioId: string, ids: Iterable<string>): Plant[] {
   const wanted = [...new Set(ids)]
