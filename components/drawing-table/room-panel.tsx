@@ -33,6 +33,9 @@ async function askFits(facadeId: string, spot: Spot): Promise<FitsAnswer> {
 const sizeText = ({ height, spread }: Size) => `${formatLength(height)} high and ${formatLength(spread)} across`
 const rangeText = (low: number, high: number) => (low === high ? formatLength(low) : `${formatLength(low)} to ${formatLength(high)}`)
 
+/** Crowns of another habit, or that may overlap more, come to more than the mounded one. */
+const fillText = (fill: number) => (fill >= 0.95 ? 'fills the room' : `fills ${Math.round(fill * 100)} percent of the room`)
+
 function PlantLine({ plant, children }: { plant: Plant; children?: React.ReactNode }) {
   return (
     <span className="min-w-0 flex-1">
@@ -56,7 +59,7 @@ function Answered({ answer, spot, sheet }: { answer: FitsAnswer; spot: Spot; she
       <ul>
         {named(answer.fits).map(({ plant, fill }) => (
           <li key={plant.id} className="flex items-center gap-2 border-b border-rule px-4 py-2">
-            <PlantLine plant={plant}><span className="block text-sm text-ink-soft">fills {Math.round(fill * 100)} percent of the room</span></PlantLine>
+            <PlantLine plant={plant}><span className="block text-sm text-ink-soft">{fillText(fill)}</span></PlantLine>
             {editor.canEdit ? <button type="button" className={PLAIN} aria-label={`Plant ${plant.botanical} here`} onClick={() => editor.add(plant, spot.x, spot.y)}>Plant</button> : null}
           </li>
         ))}
