@@ -9,7 +9,7 @@ import { judgeSizes, type Measure } from '../verdict'
 /** Plants farther out than this hide nothing from those who come near. */
 const FAR_IN = 240
 /** Slices of the number's height in which the covered share is added up. */
-const SLICES = 64
+const SLICES = 512
 
 /** Share of the fixture's face that a crown hides, seen square-on. */
 function coveredShare(crown: Crown, { x, width, z, height }: Fixture): number {
@@ -35,7 +35,9 @@ function judgeFace(one: Grown, fixture: Fixture): Finding | null {
     measure: (bound, year, natural): Measure => {
       const crown = one.crown(bound, year, natural)
       const isBeside = topOf(crown) <= z || footOf(crown) >= z + height
-      return isBeside ? { measured: 0, excess: -Infinity } : { measured: coveredShare(crown, fixture), excess: reach(crown, z, z + height) - dx }
+      if (isBeside) return { measured: 0, excess: -Infinity }
+      // The share is told of the grown plant alone; the years ask only whether it laps.
+      return { measured: year === 'mature' ? coveredShare(crown, fixture) : null, excess: reach(crown, z, z + height) - dx }
     },
   })
 }

@@ -1,5 +1,6 @@
 import { reach } from '../crown'
 import { squareToBox } from '../geometry/box'
+import { CONTACT } from '../geometry/contact'
 import { distanceToPolygon, nearestOnSegment } from '../geometry/polygon'
 import { wallY } from '../geometry/wall'
 import { numberOf, stretchOf, type Grown, type Prepared } from '../prepared'
@@ -11,9 +12,12 @@ import { ON_WALL_REACH } from './walk-edge'
 /** Thorns count up to above a person's head. */
 const HEAD_IN = 80
 
+/** The line of a door lies in its own stretch of wall: a return that begins at its edge is none of it. */
+const INSIDE = 2 * CONTACT
+
 /** Distance in plan from an axis to the line of a door in its wall. */
 export function toDoorLine(facade: Facade, { x, width }: Opening, point: { x: Inches; y: Inches }): Inches {
-  const near = nearestOnSegment(point, { x, y: wallY(facade, x) }, { x: x + width, y: wallY(facade, x + width) })
+  const near = nearestOnSegment(point, { x, y: wallY(facade, x + INSIDE) }, { x: x + width, y: wallY(facade, x + width - INSIDE) })
   return Math.hypot(point.x - near.x, point.y - near.y)
 }
 
@@ -57,6 +61,8 @@ export const thorns: Rule = {
       ...walks.near(from - limit, to + limit).flatMap(({ thing, box }) => (squareToBox(axis, box) < far ? [{ feature: thing.id, distance: distanceToPolygon(axis, thing.outline) }] : [])),
       ...doors.near(from - limit, to + limit).map((door) => ({ feature: door.id, distance: toDoorLine(sheet.facade, door, axis) })),
     ]
-    return near.flatMap((feature) => judgeDistance(prepared, one, feature) ?? [])
+    // A walk and a door may have one id: the nearer speaks for both, for a finding has one identity.
+    const nearest = new Map(near.sort((a, b) => b.distance - a.distance).map((feature) => [feature.feature, feature]))
+    return [...nearest.values()].flatMap((feature) => judgeDistance(prepared, one, feature) ?? [])
   },
 }

@@ -16,6 +16,15 @@ test('and to the line of a door', () => {
   expect(thorny({ x: 296, y: 0 }, doors)).toEqual([])
   expect(thorny({ x: 295.98, y: 0 }, doors)).toHaveLength(1)
 })
+test('a return of the wall at the edge of a door is not its line', () => {
+  const wall = [{ x: 0, y: 0 }, { x: 240, y: 0 }, { x: 240, y: 40 }, { x: 480, y: 40 }]
+  const jogged = { walks: [], openings: [makeDoor()], facade: { ...makeSheet().facade, wall } }
+  expect(thorny({ x: 260, y: 60 }, jogged)).toEqual([])
+})
+test('a walk and a door of one id are one finding, by the nearer', () => {
+  const both = { walks: [{ ...makeWalk(140), id: 'x' }], openings: [makeDoor({ id: 'x' })] }
+  expect(thorny({ x: 220, y: 90 }, both)).toMatchObject([{ key: 'thorns:a1:x', excess: 6 }])
+})
 test('a studio may ask another distance', () => {
   expect(thorny({ y: 84.02 }, { standards: { 'thorns.distance': 30 } })).toEqual([])
 })
