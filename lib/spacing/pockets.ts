@@ -19,14 +19,20 @@ interface Disc extends Point {
   radius: Inches
 }
 
+export type SpacingPattern = 'square' | 'staggered'
+
 /**
- * Annuals to order for a round pocket: area x 144/s^2 to the square foot on a square grid, 2/sqrt 3 as many staggered,
- * rounded up. Bloomin Designs, plant calculator, https://www.bloomindesigns.com/plant-calculator/ (read).
+ * Plants that an area takes, not rounded: 144/s^2 to the square foot on a square grid, 2/sqrt 3 as many staggered.
+ * @param area square inches
+ * Bloomin Designs, plant calculator, https://www.bloomindesigns.com/plant-calculator/ (read).
  */
-export function annualsIn(diameter: Inches, spacing: Inches = ANNUAL_SPACING_IN, pattern: 'square' | 'staggered' = 'square'): number {
-  const each = (Math.PI * diameter * diameter) / 4 / (spacing * spacing)
-  return Math.ceil(pattern === 'square' ? each : each * STAGGERED)
+export function plantsInArea(area: number, spacing: Inches, pattern: SpacingPattern = 'square'): number {
+  return (area / (spacing * spacing)) * (pattern === 'square' ? 1 : STAGGERED)
 }
+
+/** Annuals to order for a round pocket, rounded up. */
+export const annualsIn = (diameter: Inches, spacing: Inches = ANNUAL_SPACING_IN, pattern: SpacingPattern = 'square'): number =>
+  Math.ceil(plantsInArea((Math.PI * diameter * diameter) / 4, spacing, pattern))
 
 interface Cell extends Point {
   half: Inches

@@ -1,2 +1,4 @@
 export * from './plant-list'
 export * from './csv'
+export * from './beds'
+export * from './mulch'

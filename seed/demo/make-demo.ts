@@ -68,7 +68,7 @@ function makeProject(context: Context, { input, stage, house, planting }: Commis
   context.db.update(projects).set({ stage }).where(eq(projects.id, id)).run()
 }
 
-const SITE = { latitude: undefined, longitude: undefined, moisture: 'medium', deer: 'some', walnut: 'none', fireZone: false }
+const SITE = { latitude: 41.6, longitude: -73.9, moisture: 'medium', deer: 'some', walnut: 'none', fireZone: false }
 
 const COMMISSIONS: Commission[] = [
   {

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next'
 import { notFound } from 'next/navigation'
+import { BedsTable } from '@/components/takeoff/beds-table'
 import { PlantListTable } from '@/components/takeoff/plant-list-table'
 import { buttonClass, EmptyState, LinkButton, PageHeader } from '@/components/ui'
 import { AppError } from '@/lib/errors'
@@ -27,7 +28,7 @@ export default async function PlantListPage({ params }: Props) {
   const { projectId, facadeId } = await params
   const found = readList(await requireContext('member'), projectId, facadeId)
   if (!found) notFound()
-  const { facade, rows } = found
+  const { facade, rows, beds } = found
   const table = `/projects/${projectId}/facades/${facadeId}`
   const file = `/api/facades/${facadeId}/plant-list`
   const crumbs = [{ href: '/projects', label: 'Projects' }, { href: `/projects/${projectId}`, label: facade.projectName }, { href: table, label: facade.name }]
@@ -42,6 +43,7 @@ export default async function PlantListPage({ params }: Props) {
       {rows.length === 0
         ? <EmptyState title="Nothing to count yet" action={<LinkButton href={table} variant="primary">Open the drawing table</LinkButton>}>Plants placed on this facade are counted here.</EmptyState>
         : <PlantListTable rows={rows} />}
+      {beds.beds.length > 0 && <BedsTable takeoff={beds} />}
     </main>
   )
 }
