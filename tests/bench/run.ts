@@ -2,9 +2,11 @@
  * `npm run bench`: the full check beside two plain versions of the same questions, one moved placement, and growth with size.
  * All in one run on one machine; read the ratios, not the milliseconds. Never a test: tests check that the versions agree.
  */
-import { check, checkPlacement, prepare, type Sheet } from '@/lib/spacing'
+import { readPlants } from '../reference/library'
+import { check, checkPlacement, fitsHere, prepare, type Placement, type Sheet } from '@/lib/spacing'
 import { allPairs } from './all-pairs'
 import { byPolygons } from './by-polygons'
+import { onFlatbush } from './on-flatbush'
 import { frontOf } from './scenes'
 
 interface Timing { ms: number; runs: number }
@@ -41,17 +43,38 @@ function compare(count: number) {
   const sheet = frontOf(count)
   const full = time(() => check(sheet), { runs: 15 })
   const move = moving(sheet)
+  const figures = time(() => JSON.stringify(check(sheet)), { runs: 7 })
+  const flat = time(() => onFlatbush(sheet), { runs: 9 })
   const pairs = time(() => allPairs(sheet), { runs: 5 })
-  const polygons = time(() => byPolygons(sheet), { runs: count > 100 ? 1 : 3, warm: false })
+  const polygons = count > 200 ? null : time(() => byPolygons(sheet), { runs: count > 100 ? 1 : 3, warm: false })
   const findings = check(sheet).findings.length
   console.log(`\n${count} placements, ${sheet.openings.length} windows, ${sheet.walks.length} walks: ${findings} findings`)
   const row = (name: string, { ms, runs }: Timing) => [name, milliseconds(ms), `${times(ms / full.ms)} x`, `${runs}`]
   print([
     ['', 'median', 'of the full check', 'runs'],
     row('full check, all rules', full),
+    row('with windows, cover, pockets, upkeep', figures),
+    row('all rules, flatbush for the grid', flat),
     row('one moved placement, size and neighbour rules', move),
     row('six rules, every pair, same arithmetic', pairs),
-    row('six rules, polygon library', polygons),
+    ...(polygons ? [row('six rules, polygon library', polygons)] : []),
+  ])
+}
+
+/** What fits at a spot, over the whole library, beside checking the sheet anew with each candidate in turn. */
+function fitting() {
+  const sheet = frontOf(60)
+  const library = readPlants()
+  const spot = { x: 600, y: 70 }
+  const prepared = prepare(sheet)
+  const fast = time(() => fitsHere(prepared, spot, library), { runs: 15 })
+  const candidate = (id: string): Placement => ({ id: 'new', plant: id, ...spot, planted: { height: 6, spread: 6 } })
+  const slow = time(() => library.map((plant) => check({ ...sheet, plants: [...sheet.plants, plant], placements: [...sheet.placements, candidate(plant.id)] }).findings), { runs: 1, warm: false })
+  console.log(`\nWhat fits at a spot among 60 plants, ${library.length} plants of the library`)
+  print([
+    ['', 'median', 'of fits-here', 'runs'],
+    ['fits-here, with the frontier', milliseconds(fast.ms), '1.0 x', `${fast.runs}`],
+    ['each candidate by a full check', milliseconds(slow.ms), `${times(slow.ms / fast.ms)} x`, `${slow.runs}`],
   ])
 }
 
@@ -67,6 +90,8 @@ function growth() {
 }
 
 console.log(`Node ${process.version}. Medians; the ratio is what counts.`)
-compare(60)
+compare(50)
 compare(200)
+compare(500)
+fitting()
 growth()

@@ -11,7 +11,6 @@ export const fireZone: Rule = {
     title: 'Wildfire zone',
     question: 'Does it stand clear of the house in a wildfire area?',
     settings: [{ name: 'fire-zone.distance', label: 'Kept free of plants before the wall in a wildfire area', default: 60, min: 0, max: 120, unit: 'in' }],
-    fixedKind: 'conflict',
     sources: [{ publisher: 'University of Nevada, Reno Extension', title: 'Living With Fire: the ember-resistant zone, 0 to 5 ft', address: 'https://www.livingwithfire.com/get-prepared/how-to-improve-my-defensible-space/zone-0-the-ember-resistant-zone-0-5-feet/', known: 'read' }],
     notes: 'Asked where the site is marked as a wildfire area. Local law decides. An axis at the distance itself stands clear.',
   },

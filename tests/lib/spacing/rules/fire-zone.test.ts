@@ -21,7 +21,6 @@ test('shears hold the crown, not the axis', () => {
 test('only where the site is marked, and by the distance a studio sets', () => {
   expect(near({ y: 50 }, { site: { ...site, fireZone: false } })).toEqual([])
   expect(near({ y: 50 }, { standards: { 'fire-zone.distance': 30 } })).toEqual([])
-  expect(near({ y: 50 }, { standards: { 'fire-zone.kind': 'off' } })).toEqual([])
 })
 test('one size of three is a risk too', () => {
   expect(near({ y: 78, planted: { height: 8, spread: 8 } }, { plants: [makePlant({ spreadMin: 20, spreadMax: 40 })] })[0]).toMatchObject({ kind: 'risk', excess: 2 })
