@@ -1,7 +1,7 @@
 /**
  * Street and park trees as measured, means by species, city and age group of at least four trees.
  * Source: US Forest Service, Urban tree database, RDS-2016-0005 (2016, errata January 2020),
- * https://doi.org/10.2737/RDS-2016-0005 (public domain). Age is years since planting, as the data say. Heights in inches.
+ * https://doi.org/10.2737/RDS-2016-0005 (public domain). Age is years since planting, as the data say. Heights and crowns in inches.
  *
  * Sizes: `library` = the plant of that name in seed/plants.csv. Species the library does not carry stand here with the
  * size a public list gives, and where it was read; "from memory" where it was not read.
@@ -18,51 +18,53 @@ export interface Cohort {
   age: number
   /** Mean height, inches. */
   height: number
+  /** Mean width of the crown, inches; null where it was not measured. */
+  crown: number | null
 }
 
-const rows: [string, string, string, number, number, number][] = [
-  ['Acer palmatum', 'Berkeley', '10a', 4, 13.0, 132],
-  ['Acer palmatum', 'Berkeley', '10a', 4, 26.0, 274],
-  ['Betula nigra', 'Charlotte', '8a', 5, 8.6, 272],
-  ['Betula nigra', 'Charlotte', '8a', 9, 15.0, 470],
-  ['Betula nigra', 'Charlotte', '8a', 10, 20.0, 663],
-  ['Betula nigra', 'Charlotte', '8a', 12, 26.7, 615],
-  ['Cornus florida', 'Charleston', '9a', 7, 9.0, 239],
-  ['Cornus florida', 'Charleston', '9a', 12, 20.0, 274],
-  ['Cornus florida', 'Charleston', '9a', 7, 26.4, 264],
-  ['Crataegus × lavallei', 'Longview', '8b', 21, 18.0, 278],
-  ['Crataegus × lavallei', 'Longview', '8b', 10, 29.0, 358],
-  ['Ilex opaca', 'Charleston', '9a', 4, 9.2, 143],
-  ['Ilex opaca', 'Charleston', '9a', 19, 14.1, 259],
-  ['Ilex opaca', 'Charleston', '9a', 8, 19.9, 428],
-  ['Ilex opaca', 'Charlotte', '8a', 4, 13.5, 187],
-  ['Ilex opaca', 'Charlotte', '8a', 5, 18.0, 213],
-  ['Ilex opaca', 'Charlotte', '8a', 6, 25.3, 213],
-  ['Juniperus virginiana', 'Charleston', '9a', 5, 15.0, 118],
-  ['Juniperus virginiana', 'Charleston', '9a', 7, 20.0, 343],
-  ['Juniperus virginiana', 'Charleston', '9a', 16, 27.2, 308],
-  ['Lagerstroemia indica', 'Charleston', '9a', 4, 3.5, 137],
-  ['Lagerstroemia indica', 'Charleston', '9a', 9, 8.8, 199],
-  ['Lagerstroemia indica', 'Charleston', '9a', 7, 14.4, 270],
-  ['Lagerstroemia indica', 'Charleston', '9a', 4, 20.0, 300],
-  ['Lagerstroemia indica', 'Charleston', '9a', 7, 27.1, 239],
-  ['Magnolia grandiflora', 'Charleston', '9a', 4, 13.5, 428],
-  ['Magnolia grandiflora', 'Charleston', '9a', 6, 17.0, 272],
-  ['Magnolia grandiflora', 'Charleston', '9a', 10, 28.0, 382],
-  ['Malus sp.', 'Minneapolis', '5a', 4, 3.8, 141],
-  ['Malus sp.', 'Minneapolis', '5a', 7, 8.1, 170],
-  ['Malus sp.', 'Minneapolis', '5a', 5, 11.6, 173],
-  ['Malus sp.', 'Minneapolis', '5a', 16, 24.9, 278],
-  ['Prunus cerasifera', 'Albuquerque', '7b', 4, 4.0, 123],
-  ['Prunus cerasifera', 'Albuquerque', '7b', 4, 13.0, 153],
-  ['Prunus cerasifera', 'Albuquerque', '7b', 7, 26.3, 206],
-  ['Prunus × yedoensis', 'Charlotte', '8a', 10, 7.6, 260],
-  ['Prunus × yedoensis', 'Charlotte', '8a', 8, 15.0, 305],
-  ['Prunus × yedoensis', 'Charlotte', '8a', 15, 25.3, 354],
-  ['Quercus agrifolia', 'Berkeley', '10a', 8, 26.1, 411],
+const rows: [string, string, string, number, number, number, number | null][] = [
+  ['Acer palmatum', 'Berkeley', '10a', 4, 13.0, 132, 133],
+  ['Acer palmatum', 'Berkeley', '10a', 4, 26.0, 274, 257],
+  ['Betula nigra', 'Charlotte', '8a', 5, 8.6, 272, 203],
+  ['Betula nigra', 'Charlotte', '8a', 9, 15.0, 470, 346],
+  ['Betula nigra', 'Charlotte', '8a', 10, 20.0, 663, 515],
+  ['Betula nigra', 'Charlotte', '8a', 12, 26.7, 615, 501],
+  ['Cornus florida', 'Charleston', '9a', 7, 9.0, 239, 189],
+  ['Cornus florida', 'Charleston', '9a', 12, 20.0, 274, 259],
+  ['Cornus florida', 'Charleston', '9a', 7, 26.4, 264, 260],
+  ['Crataegus × lavallei', 'Longview', '8b', 21, 18.0, 278, 238],
+  ['Crataegus × lavallei', 'Longview', '8b', 10, 29.0, 358, 320],
+  ['Ilex opaca', 'Charleston', '9a', 4, 9.2, 143, 81],
+  ['Ilex opaca', 'Charleston', '9a', 19, 14.1, 259, 156],
+  ['Ilex opaca', 'Charleston', '9a', 8, 19.9, 428, 260],
+  ['Ilex opaca', 'Charlotte', '8a', 4, 13.5, 187, 131],
+  ['Ilex opaca', 'Charlotte', '8a', 5, 18.0, 213, 131],
+  ['Ilex opaca', 'Charlotte', '8a', 6, 25.3, 213, 151],
+  ['Juniperus virginiana', 'Charleston', '9a', 5, 15.0, 118, 103],
+  ['Juniperus virginiana', 'Charleston', '9a', 7, 20.0, 343, 232],
+  ['Juniperus virginiana', 'Charleston', '9a', 16, 27.2, 308, 223],
+  ['Lagerstroemia indica', 'Charleston', '9a', 4, 3.5, 137, 133],
+  ['Lagerstroemia indica', 'Charleston', '9a', 9, 8.8, 199, 170],
+  ['Lagerstroemia indica', 'Charleston', '9a', 7, 14.4, 270, 264],
+  ['Lagerstroemia indica', 'Charleston', '9a', 4, 20.0, 300, 254],
+  ['Lagerstroemia indica', 'Charleston', '9a', 7, 27.1, 239, 228],
+  ['Magnolia grandiflora', 'Charleston', '9a', 4, 13.5, 428, 259],
+  ['Magnolia grandiflora', 'Charleston', '9a', 6, 17.0, 272, 213],
+  ['Magnolia grandiflora', 'Charleston', '9a', 10, 28.0, 382, 278],
+  ['Malus sp.', 'Minneapolis', '5a', 4, 3.8, 141, 93],
+  ['Malus sp.', 'Minneapolis', '5a', 7, 8.1, 170, 158],
+  ['Malus sp.', 'Minneapolis', '5a', 5, 11.6, 173, 145],
+  ['Malus sp.', 'Minneapolis', '5a', 16, 24.9, 278, 271],
+  ['Prunus cerasifera', 'Albuquerque', '7b', 4, 4.0, 123, 98],
+  ['Prunus cerasifera', 'Albuquerque', '7b', 4, 13.0, 153, 134],
+  ['Prunus cerasifera', 'Albuquerque', '7b', 7, 26.3, 206, 245],
+  ['Prunus × yedoensis', 'Charlotte', '8a', 10, 7.6, 260, 294],
+  ['Prunus × yedoensis', 'Charlotte', '8a', 8, 15.0, 305, 355],
+  ['Prunus × yedoensis', 'Charlotte', '8a', 15, 25.3, 354, 456],
+  ['Quercus agrifolia', 'Berkeley', '10a', 8, 26.1, 411, 332],
 ]
 
-export const COHORTS: readonly Cohort[] = rows.map(([species, city, zone, trees, age, height]) => ({ species, city, zone, trees, age, height }))
+export const COHORTS: readonly Cohort[] = rows.map(([species, city, zone, trees, age, height, crown]) => ({ species, city, zone, trees, age, height, crown }))
 
 export interface PublishedSize {
   /** Inches. */

@@ -1,6 +1,7 @@
 /** The library's plants as the check reads them, straight from the seed. */
 import { readFileSync } from 'node:fs'
-import { parsePlantCsv, plantSchema, type Plant } from '@/lib/plants'
+import { plantSchema, type Plant } from '@/lib/plants'
+import { parsePlantCsv } from '@/lib/plants/csv'
 
 export function readPlants(): Plant[] {
   const { rows } = parsePlantCsv(readFileSync('seed/plants.csv', 'utf8'))
