@@ -37,7 +37,7 @@ function OneBed({ bed, sheet, report }: { bed: Bed; sheet: Sheet; report: Report
   const cover = report.cover.find(({ id }) => id === bed.id)
   return (
     <section aria-label={bed.name} className="grid gap-3 border-b border-rule p-4">
-      <h3 className="font-heading text-xl">{bed.name}</h3>
+      <h2 className="font-heading text-xl">{bed.name}</h2>
       {cover && <ShareChart title="Cover" what="of the soil under plants" shares={cover} />}
       <Pockets pockets={report.pockets.filter((pocket) => pocket.bed === bed.id)} />
       {plants.length > 0 && <FoliageStrip bed={bed} standing={standing} month={month} />}
@@ -65,7 +65,7 @@ export function BedsPanel() {
       {sheet.beds.map((bed) => <OneBed key={bed.id} bed={bed} sheet={sheet} report={report} />)}
       {windows.length > 0 && (
         <section aria-label="Windows" className="grid gap-3 p-4">
-          <h3 className="font-heading text-xl">Windows</h3>
+          <h2 className="font-heading text-xl">Windows</h2>
           {windows.map(({ opening, shares }) => <ShareChart key={opening.id} title={opening.name} what="of the glass hidden" shares={shares} />)}
         </section>
       )}

@@ -37,8 +37,8 @@ export function WaysOut({ finding }: { finding: Finding }) {
   if (remedies.length === 0) return <p role="status" className="mt-2">{NO_WAY_OUT}</p>
   return (
     <div className="mt-3">
-      <h3 className="font-bold">Ways out</h3>
-      <ul className="mt-1 grid gap-2">
+      <p id="ways-out" className="font-bold">Ways out</p>
+      <ul aria-labelledby="ways-out" className="mt-1 grid gap-2">
         {remedies.map((remedy) => {
           const words = describeRemedy(remedy, finding, sheet, plants ?? [])
           const plant = remedy.kind === 'swap' ? plants?.find(({ id }) => id === remedy.plant) : undefined
