@@ -35,7 +35,8 @@ function rulesOf({ standards }: Pick<Prepared, 'standards'>): RulesInForce {
   return found
 }
 
-const named = (finding: Finding, kind: FindingKind | null): Finding => (kind === null ? finding : { ...finding, kind })
+/** A finding as the studio calls it; what is held stays held, for it is a commitment and no judgement. */
+const named = (finding: Finding, kind: FindingKind | null): Finding => (kind === null || finding.kind === 'held' ? finding : { ...finding, kind })
 
 /** Hears findings one by one; answers true to hear no more. */
 type Listener = (finding: Finding) => boolean

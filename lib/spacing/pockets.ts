@@ -88,13 +88,15 @@ class Search {
   }
 }
 
-function pocketsOf(bed: Bed, crowns: readonly Disc[]): Pocket[] {
+/** The pockets of one bed; each is taken out of what is empty for the beds after it, should they overlap. */
+function pocketsOf(bed: Bed, taken: Disc[]): Pocket[] {
   const { left, right } = boxOf(bed.outline)
-  const discs = crowns.filter(({ x, radius }) => x + radius > left && x - radius < right)
+  const discs = taken.filter(({ x, radius }) => x + radius > left && x - radius < right)
   const search = new Search(bed, discs)
   const pockets: Pocket[] = []
   for (let found = search.largest(); found && pockets.length < MOST_A_BED; found = search.largest()) {
     discs.push(found)
+    taken.push(found)
     search.take(found)
     pockets.push({ bed: bed.id, x: found.x, y: found.y, diameter: 2 * found.radius, annuals: annualsIn(2 * found.radius) })
   }
@@ -103,6 +105,6 @@ function pocketsOf(bed: Bed, crowns: readonly Disc[]): Pocket[] {
 
 /** The pockets of every bed at expected maturity: empty circles, disjoint, largest first, to a quarter inch. */
 export function pocketsOfSheet({ sheet, grown }: Prepared): Pocket[] {
-  const crowns = grown.filter((one) => !isOnWall(one)).map(({ mature: { expected } }) => ({ x: expected.x, y: expected.y, radius: expected.spread / 2 }))
-  return sheet.beds.flatMap((bed) => pocketsOf(bed, crowns))
+  const taken: Disc[] = grown.filter((one) => !isOnWall(one)).map(({ mature: { expected } }) => ({ x: expected.x, y: expected.y, radius: expected.spread / 2 }))
+  return sheet.beds.flatMap((bed) => pocketsOf(bed, taken))
 }

@@ -1,6 +1,6 @@
 /** What a kept size costs: how often it is clipped, and how long that takes. */
 import type { Plant } from '../plants/types'
-import { courseOf } from './growth'
+import { courseOf, matureSize, sizeOn } from './growth'
 import { numberOf, type Prepared } from './prepared'
 import type { Inches, Placement, RuleMeta, Size, Upkeep } from './types'
 
@@ -25,15 +25,16 @@ export const UPKEEP_META: RuleMeta = {
     minutes('ladder', 'Minutes for one clipping, kept taller', 25),
   ],
   sources: [{ publisher: 'Common practice', title: 'Clipping time of one shrub by hand shears, with clearing up', address: null, known: 'practice' }],
-  notes: 'One clipping for each 6 in of new growth in a year: the growth of the expected size from the kept one, in height or to one side, whichever is more.',
+  notes: 'One clipping for each 6 in of new growth in a year: what an established plant of the kept size gains towards its expected one, in height or to one side, whichever is more.',
 }
 
-/** How far a plant would grow past its kept size in one year: upward, or to one side. */
+/** How far a plant just clipped grows past its kept size in one year, as an established one of that size would: upward, or to one side. */
 function regrowth(plant: Plant, placement: Placement, zone: string): Inches {
-  const { mature, k } = courseOf({ plant, placement, zone, bound: 'expected' })
-  const share = k === Infinity ? 1 : 1 - Math.exp(-k)
-  const past = (whole: Inches, kept: Inches | undefined) => (kept === undefined ? 0 : Math.max(0, whole - kept))
-  return share * Math.max(past(mature.height, placement.kept?.height), past(mature.spread, placement.kept?.spread) / 2)
+  const whole = matureSize(plant, placement, 'expected')
+  const planted = { height: Math.min(whole.height, placement.kept?.height ?? Infinity), spread: Math.min(whole.spread, placement.kept?.spread ?? Infinity) }
+  const after = sizeOn(courseOf({ plant, placement: { ...placement, planted, status: 'stays' }, zone, bound: 'expected' }), 1)
+  const past = (extent: keyof Size) => (placement.kept?.[extent] === undefined ? 0 : after[extent] - planted[extent])
+  return Math.max(past('height'), past('spread') / 2)
 }
 
 function minutesFor(prepared: Pick<Prepared, 'standards'>, { height }: Size): number {

@@ -1,3 +1,4 @@
+import { plantedBeds } from '../by-bed'
 import { topOf } from '../crown'
 import { judgeExpected } from '../expected-only'
 import { findingOf } from '../finding'
@@ -33,10 +34,11 @@ const isNear = (corner: Corner, { placement: { x, y } }: Grown, near: Inches) =>
 function emptyCorner(prepared: Prepared, corner: Corner, standing: readonly Grown[]): Finding[] {
   const limit = Math.min(LEAST_SHARE * corner.wall, numberOf(prepared, 'corner-height.least'))
   const near = numberOf(prepared, 'corner-height.near')
-  if (!prepared.sheet.beds.some(({ outline }) => distanceToPolygon(corner.at, outline) <= near)) return []
+  if (!plantedBeds(prepared).some(({ bed }) => distanceToPolygon(corner.at, bed.outline) <= near)) return []
   const tallest = Math.max(0, ...standing.map(({ mature }) => topOf(mature.expected) - corner.soil))
   if (limit - tallest <= CONTACT) return []
-  return [findingOf({ rule: 'corner-height', kind: 'note', placements: [], feature: corner.id, limit, measured: { low: null, expected: tallest, high: null }, excess: limit - tallest })]
+  const measured = standing.length > 0 ? { low: null, expected: tallest, high: null } : null
+  return [findingOf({ rule: 'corner-height', kind: 'note', placements: [], feature: corner.id, limit, measured, excess: limit - tallest })]
 }
 
 export const cornerHeight: Rule = {
@@ -52,7 +54,7 @@ export const cornerHeight: Rule = {
     ],
     fixedKind: 'risk',
     sources: [{ publisher: 'NDSU Extension', title: 'Foundation Plantings: corner shrubs at 2/3 to 3/4 of the eave', address: 'https://www.ag.ndsu.edu/hort/info/inform/wplts/foundation.htm', known: 'read' }],
-    notes: 'Heights are above the soil at the corner, at the expected size. An empty corner is a note where a bed comes near it; a third of the wall, or 48 in if that is less, closes it.',
+    notes: 'Heights are above the soil at the corner, at the expected size. An empty corner is a note where a planted bed comes near it; a third of the wall, or 48 in if that is less, closes it.',
   },
   judge: (prepared) => {
     const near = numberOf(prepared, 'corner-height.near')

@@ -18,12 +18,12 @@ export const openDrift: Rule = {
     settings: [],
     fixedKind: 'note',
     sources: [{ publisher: 'Common practice', title: 'Plants of a drift stand no farther apart than one and a half spreads', address: null, known: 'practice' }],
-    notes: 'Measured to the nearest mate; the limit is one and a half times the mean of the two expected spreads, as kept. A drift of one is not judged, nor are plants trained on the wall.',
+    notes: 'Measured to the nearest mate; the limit is one and a half times the mean of the two expected spreads, as kept. A drift of one is not judged, nor are two that stay, nor plants trained on the wall.',
   },
   judge: ({ drifts }, one) => {
     const { drift, id } = one.placement
     if (drift === undefined || isOnWall(one)) return []
-    const mates = (drifts.get(drift) ?? []).filter((mate) => mate.placement.id !== id && !isOnWall(mate))
+    const mates = (drifts.get(drift) ?? []).filter((mate) => mate.placement.id !== id && !isOnWall(mate) && !(one.stays && mate.stays))
     if (mates.length === 0) return []
     const nearest = mates.reduce((best, mate) => (apart(one, mate) < apart(one, best) ? mate : best))
     const distance = apart(one, nearest)

@@ -28,6 +28,11 @@ describe('pockets', () => {
     const found = pockets(rectangle(40, 200, 0, 48), [{ x: 120, y: 24 }])
     expect(found.slice(0, 2).map(({ diameter }) => Math.round(diameter))).toEqual([48, 48])
   })
+  test('beds that overlap share no pocket', () => {
+    const sheet = makeSheet({ beds: [makeBed({ outline: rectangle(0, 60, 0, 60) }), makeBed({ id: 'b2', outline: rectangle(20, 80, 0, 60) })] })
+    const [one, other] = check(sheet).pockets
+    expect(Math.hypot(one!.x - other!.x, one!.y - other!.y)).toBeGreaterThanOrEqual((one!.diameter + other!.diameter) / 2 - 1e-6)
+  })
   test('a strip narrower than 18 in has none', () => {
     expect(pockets(rectangle(0, 300, 0, 17.9))).toEqual([])
     expect(pockets(rectangle(0, 40, 0, 18.6))).not.toEqual([])
@@ -40,7 +45,7 @@ describe('pockets', () => {
         const { outline } = sheet.beds.find(({ id }) => id === bed)!
         expect(-distanceToPolygon({ x, y }, outline)).toBeGreaterThanOrEqual(diameter / 2 - 1e-6)
         for (const other of found.slice(0, i)) {
-          if (other.bed === bed) expect(Math.hypot(x - other.x, y - other.y)).toBeGreaterThanOrEqual((diameter + other.diameter) / 2 - 1e-6)
+          expect(Math.hypot(x - other.x, y - other.y)).toBeGreaterThanOrEqual((diameter + other.diameter) / 2 - 1e-6)
         }
       }
     }), { numRuns: 30, seed: 20261201 })
@@ -48,18 +53,18 @@ describe('pockets', () => {
 })
 
 describe('upkeep', () => {
-  // Moderate shrub in zone 6a: 10 in a year at first, expected 60 by 60, planted 12: k = 10/48.
+  // Moderate shrub in zone 6a: 10 in a year at first, expected 60 by 60.
   const plant = makePlant({ heightMin: 60, heightMax: 60, spreadMin: 60, spreadMax: 60 })
   const upkeep = (kept: Placement['kept'], standards = {}) => check(makeSheet({ plants: [plant], placements: [makePlacement({ ...(kept && { kept }) })], standards })).upkeep
 
   test('one clipping for each 6 in of a year\'s regrowth', () => {
-    // From 36 in it would regrow 24 x (1 - exp(-10/48)) = 4.5 in: one. From 12 in 48 x 0.188 = 9.0 in: two.
-    expect(upkeep({ height: 36 })).toEqual([{ placement: 'a1', clippingsPerYear: 1, minutesPerYear: 5, minutesOverTenYears: 50 }])
-    expect(upkeep({ height: 12 })[0]).toMatchObject({ clippingsPerYear: 2, minutesPerYear: 10 })
+    // From 36 in 24 are to come, k = 10/24: 24 x (1 - exp(-10/24)) = 8.2 in in a year, two clippings. From 55 in 4.3: one.
+    expect(upkeep({ height: 36 })).toEqual([{ placement: 'a1', clippingsPerYear: 2, minutesPerYear: 10, minutesOverTenYears: 100 }])
+    expect(upkeep({ height: 55 })[0]).toMatchObject({ clippingsPerYear: 1, minutesPerYear: 12 })
   })
   test('taller plants take longer, by the studio\'s own minutes', () => {
-    expect(upkeep({ height: 48 })[0]).toMatchObject({ minutesPerYear: 12 })
-    expect(upkeep({ height: 48 }, { 'upkeep.reached': 30 })[0]).toMatchObject({ minutesPerYear: 30, minutesOverTenYears: 300 })
+    expect(upkeep({ height: 48 })[0]).toMatchObject({ minutesPerYear: 24 })
+    expect(upkeep({ height: 48 }, { 'upkeep.reached': 30 })[0]).toMatchObject({ minutesPerYear: 60, minutesOverTenYears: 600 })
   })
   test('what it never outgrows costs nothing, and what is not kept is not told of', () => {
     expect(upkeep({ height: 80 })[0]).toMatchObject({ clippingsPerYear: 0, minutesPerYear: 0 })

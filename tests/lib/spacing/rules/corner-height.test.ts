@@ -32,14 +32,15 @@ describe('an empty corner', () => {
   test('is a note where a bed comes near and nothing closes it: a third of the gutter', () => {
     expect(at(36, {}, { beds })).toEqual([])
     expect(at(35.98, {}, { beds })[0]).toMatchObject({ kind: 'note', placements: [], feature: 'left', limit: 36 })
-    expect(at(36, { x: 100 }, { beds })[0]).toMatchObject({ kind: 'note', measured: { expected: 0 } })
+    expect(at(36, { x: 100 }, { beds })[0]).toMatchObject({ kind: 'note', measured: null, excess: 36 })
   })
   test('4 ft is enough under any gutter', () => {
     const tall = { facade: { ...makeSheet().facade, gutter: 240 }, beds }
     expect(at(48, {}, tall)).toEqual([])
     expect(at(47.98, {}, tall)).toHaveLength(1)
   })
-  test('without a bed near it nothing is asked', () => {
+  test('without a planted bed near it nothing is asked', () => {
+    expect(at(10, { x: 400 }, { beds })).toEqual([])
     expect(at(10, {}, { beds: [] })).toEqual([])
   })
 })
