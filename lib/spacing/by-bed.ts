@@ -1,5 +1,5 @@
 /** What stands in a bed, and the figures its composition is judged by: crowns at expected maturity, as kept. */
-import { crownVolume } from './crown'
+import { crownVolume, type Crown } from './crown'
 import type { Grown, Prepared } from './prepared'
 import type { Bed } from './types'
 import type { Plant } from '../plants/types'
@@ -28,12 +28,15 @@ export function plantedBeds(prepared: Prepared): Planted[] {
   return found
 }
 
+/** The crown at expected maturity, as kept or as it would be unclipped. */
+export const grownUp = (one: Grown, natural: boolean): Crown => (natural ? one.natural : one.mature).expected
+
 /** Share of some plants' crown volume that `weightOf` counts (0 to 1 each); null where there is no volume. */
-export function volumeShare(plants: readonly Grown[], weightOf: (one: Grown) => number): number | null {
+export function volumeShare(plants: readonly Grown[], natural: boolean, weightOf: (one: Grown) => number): number | null {
   let whole = 0
   let counted = 0
   for (const one of plants) {
-    const volume = crownVolume(one.mature.expected)
+    const volume = crownVolume(grownUp(one, natural))
     whole += volume
     counted += volume * weightOf(one)
   }

@@ -26,3 +26,22 @@ export function judgeExpected({ rule, one, feature, limit, measure }: Asked): Fi
   const unclipped = one.isKept ? past(one.natural.expected) : null
   return unclipped ? findingOf({ ...about, kind: 'held', ...unclipped }) : null
 }
+
+interface AskedOfBed {
+  rule: string
+  bed: string
+  /** A share of the bed's planting, as kept or unclipped; null where there is nothing to share. */
+  share(natural: boolean): number | null
+  /** The limit a share breaks; null where it breaks none. Shares are compared exactly. */
+  limitFor(share: number): number | null
+}
+
+/** A note of a bed whose share breaks a limit at expected maturity, held where only shears keep it; null where it never does. */
+export function judgeShare({ rule, bed, share, limitFor }: AskedOfBed): Finding | null {
+  for (const kind of ['note', 'held'] as const) {
+    const found = share(kind === 'held')
+    const limit = found === null ? null : limitFor(found)
+    if (limit !== null) return findingOf({ rule, kind, placements: [], feature: bed, limit, measured: { low: null, expected: found, high: null } })
+  }
+  return null
+}

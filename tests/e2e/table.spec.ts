@@ -164,3 +164,34 @@ test('what fits at a spot is drawn, listed and planted; beds tell their years', 
   await expect.poll(() => placementsOf('Perry Road')).toEqual([])
   expect(complaints).toEqual([])
 })
+
+test('years, sizes and seasons redraw both views', async ({ page }) => {
+  await signIn(page, 'reviewer')
+  await page.goto(tablePath('Kiln Lane'))
+  const table = page.getByTestId('drawing-table')
+  await expect(table.locator('canvas').first()).toBeVisible()
+  await page.waitForTimeout(600)
+  const spots = await spotsOn(page, facadeOf('Kiln Lane').facadeId)
+  const frame = (await table.boundingBox())!
+  const seam = spots.inPlan(0, 0).y - 40
+  const views = async () => {
+    await page.waitForTimeout(300)
+    const [x, width] = [frame.x, frame.width]
+    return Promise.all([
+      page.screenshot({ clip: { x, y: frame.y, width, height: seam - frame.y } }),
+      page.screenshot({ clip: { x, y: seam, width, height: frame.y + frame.height - seam } }),
+    ])
+  }
+  let before = await views()
+  for (const change of [
+    () => page.getByRole('slider').fill('2'),
+    () => page.getByText('High', { exact: true }).click(),
+    () => page.getByText('Winter', { exact: true }).click(),
+  ]) {
+    await change()
+    const after = await views()
+    expect(Buffer.compare(after[0], before[0]), 'the elevation follows').not.toBe(0)
+    expect(Buffer.compare(after[1], before[1]), 'the plan follows').not.toBe(0)
+    before = after
+  }
+})

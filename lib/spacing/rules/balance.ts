@@ -1,6 +1,6 @@
-import { plantedBeds } from '../by-bed'
+import { grownUp, plantedBeds } from '../by-bed'
 import { silhouetteArea } from '../crown'
-import { findingOf } from '../finding'
+import { judgeShare } from '../expected-only'
 import { boxOf } from '../geometry/box'
 import type { Grown } from '../prepared'
 import type { Rule } from '../rule'
@@ -9,10 +9,11 @@ const LEAST = 0.35
 const MOST = 0.65
 
 /** Share of the moments (silhouette x distance from the middle) that lies left of the middle; null where there are none. */
-function leftShare(plants: readonly Grown[], middle: number): number | null {
+function leftShare(plants: readonly Grown[], middle: number, natural: boolean): number | null {
   let [left, right] = [0, 0]
-  for (const { mature: { expected } } of plants) {
-    const moment = silhouetteArea(expected) * (expected.x - middle)
+  for (const one of plants) {
+    const crown = grownUp(one, natural)
+    const moment = silhouetteArea(crown) * (crown.x - middle)
     if (moment < 0) left -= moment
     else right += moment
   }
@@ -34,8 +35,10 @@ export const balance: Rule = {
   judge: (prepared) =>
     plantedBeds(prepared).flatMap(({ bed, plants }) => {
       const { left, right } = boxOf(bed.outline)
-      const share = leftShare(plants, (left + right) / 2)
-      if (share === null || (share >= LEAST && share <= MOST)) return []
-      return [findingOf({ rule: 'balance', kind: 'note', placements: [], feature: bed.id, limit: share < LEAST ? LEAST : MOST, measured: { low: null, expected: share, high: null } })]
+      return judgeShare({
+        rule: 'balance', bed: bed.id,
+        share: (natural) => leftShare(plants, (left + right) / 2, natural),
+        limitFor: (share) => (share < LEAST ? LEAST : share > MOST ? MOST : null),
+      }) ?? []
     }),
 }

@@ -1,5 +1,6 @@
 import { coveredShare, linesOf } from '../cover'
-import { findingOf } from '../finding'
+import { grownUp } from '../by-bed'
+import { judgeShare } from '../expected-only'
 import { boxOf } from '../geometry/box'
 import type { Rule } from '../rule'
 import { isOnWall } from '../verdict'
@@ -23,9 +24,12 @@ export const cover: Rule = {
   judge: ({ sheet, neighbours }) =>
     sheet.beds.flatMap((bed) => {
       const { left, right } = boxOf(bed.outline)
-      const crowns = neighbours.near(left, right).filter((one) => !isOnWall(one)).map(({ mature }) => mature.expected).filter(({ clearStem }) => clearStem < LOW_FOLIAGE_IN)
-      const share = coveredShare(linesOf(bed), crowns)
-      if (share >= LEAST_SHARE) return []
-      return [findingOf({ rule: 'cover', kind: 'note', placements: [], feature: bed.id, limit: LEAST_SHARE, measured: { low: null, expected: share, high: null } })]
+      const near = neighbours.near(left, right).filter((one) => !isOnWall(one))
+      const lines = linesOf(bed)
+      return judgeShare({
+        rule: 'cover', bed: bed.id,
+        share: (natural) => coveredShare(lines, near.map((one) => grownUp(one, natural)).filter(({ clearStem }) => clearStem < LOW_FOLIAGE_IN)),
+        limitFor: (share) => (share < LEAST_SHARE ? LEAST_SHARE : null),
+      }) ?? []
     }),
 }

@@ -1,5 +1,5 @@
 import { plantedBeds, volumeShare } from '../by-bed'
-import { findingOf } from '../finding'
+import { judgeShare } from '../expected-only'
 import type { Leaf } from '../../plants/types'
 import type { Rule } from '../rule'
 
@@ -22,8 +22,11 @@ export const evergreenShare: Rule = {
   },
   judge: (prepared) =>
     plantedBeds(prepared).flatMap(({ bed, plants }) => {
-      const share = volumeShare(plants.filter(({ plant }) => plant.leaf !== 'herbaceous'), ({ plant }) => WEIGHTS[plant.leaf])
-      if (share === null || (share >= LEAST && share <= MOST)) return []
-      return [findingOf({ rule: 'evergreen-share', kind: 'note', placements: [], feature: bed.id, limit: share < LEAST ? LEAST : MOST, measured: { low: null, expected: share, high: null } })]
+      const woody = plants.filter(({ plant }) => plant.leaf !== 'herbaceous')
+      return judgeShare({
+        rule: 'evergreen-share', bed: bed.id,
+        share: (natural) => volumeShare(woody, natural, ({ plant }) => WEIGHTS[plant.leaf]),
+        limitFor: (share) => (share < LEAST ? LEAST : share > MOST ? MOST : null),
+      }) ?? []
     }),
 }

@@ -1,5 +1,5 @@
 import { plantedBeds, volumeShare } from '../by-bed'
-import { findingOf } from '../finding'
+import { judgeShare } from '../expected-only'
 import type { Rule } from '../rule'
 
 const LEAST = 0.7
@@ -18,10 +18,12 @@ export const nativeShare: Rule = {
   },
   judge: (prepared) => {
     if (!prepared.sheet.site.brief?.includes('birds')) return []
-    return plantedBeds(prepared).flatMap(({ bed, plants }) => {
-      const share = volumeShare(plants, ({ plant }) => Number(plant.native.length > 0))
-      if (share === null || share >= LEAST) return []
-      return [findingOf({ rule: 'native-share', kind: 'note', placements: [], feature: bed.id, limit: LEAST, measured: { low: null, expected: share, high: null } })]
-    })
+    return plantedBeds(prepared).flatMap(({ bed, plants }) =>
+      judgeShare({
+        rule: 'native-share', bed: bed.id,
+        share: (natural) => volumeShare(plants, natural, ({ plant }) => Number(plant.native.length > 0)),
+        limitFor: (share) => (share < LEAST ? LEAST : null),
+      }) ?? [],
+    )
   },
 }

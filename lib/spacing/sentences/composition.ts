@@ -24,6 +24,9 @@ const sayEntry: Say = (finding, names) => {
   return finding.kind === 'held' ? `Leaves the view of ${door} open only while kept clipped. Left alone it grows ${over}.` : `Grows ${over}.`
 }
 
+/** What only shears keep from being so is told as that. */
+const unlessClipped = ({ kind }: Finding, sentence: string) => (kind === 'held' ? `Otherwise only while kept clipped. Left alone: ${sentence}` : sentence)
+
 const sayCover: Say = (finding) => `Grown up, plants cover ${shareText(expectedOf(finding))} of the bed; the rest stays bare soil or mulch. ${shareText(finding.limit ?? 0)} closes it.`
 
 const sayEvergreen: Say = (finding) => {
@@ -47,11 +50,11 @@ const sayBalance: Say = (finding) => {
 export const COMPOSITION: Record<string, RuleWords> = {
   'corner-height': { say: sayCorner, title: (finding, names) => (finding.placements.length === 0 ? capital(corner(finding)) : names.plant(finding.placements[0])) },
   'entry-height': { say: sayEntry },
-  cover: { say: sayCover, title: aboutFeature },
-  'evergreen-share': { say: sayEvergreen, title: aboutFeature },
+  cover: { say: (finding, ...rest) => unlessClipped(finding, sayCover(finding, ...rest)), title: aboutFeature },
+  'evergreen-share': { say: (finding, ...rest) => unlessClipped(finding, sayEvergreen(finding, ...rest)), title: aboutFeature },
   'bloom-gaps': { say: sayBloom, title: aboutFeature },
   'same-green': { say: (finding) => `Side by side stand ${expectedOf(finding)} plants of one leaf color and one texture.`, title: aboutFeature },
   'odd-drift': { say: (finding) => `A drift of ${expectedOf(finding)}: odd numbers look less set out.` },
-  balance: { say: sayBalance, title: aboutFeature },
-  'native-share': { say: (finding) => `Native plants are ${shareText(expectedOf(finding))} of the planting by volume; birds raise young where it is ${shareText(finding.limit ?? 0)} or more.`, title: aboutFeature },
+  balance: { say: (finding, ...rest) => unlessClipped(finding, sayBalance(finding, ...rest)), title: aboutFeature },
+  'native-share': { say: (finding) => unlessClipped(finding, `Native plants are ${shareText(expectedOf(finding))} of the planting by volume; birds raise young where it is ${shareText(finding.limit ?? 0)} or more.`), title: aboutFeature },
 }

@@ -76,6 +76,7 @@ const SAID: [rule: string, kind: string, sheet: Sheet, sentence: string][] = [
   ['same-green', 'note', row(4), 'Side by side stand 4 plants of one leaf color and one texture.'],
   ['odd-drift', 'note', row(4, { drift: 'd' }), 'A drift of 4: odd numbers look less set out.'],
   ['balance', 'note', inBed({ x: 100 }), 'The left side carries 100 percent of the weight about the middle of the bed.'],
+  ['balance', 'held', makeSheet({ beds, plants: [grown(40, 40)], placements: [makePlacement({ x: 140, planted: { height: 40, spread: 40 }, kept: { height: 20, spread: 20 } }), makePlacement({ id: 'a2', x: 280, planted: { height: 40, spread: 40 } })] }), 'Otherwise only while kept clipped. Left alone: The left side carries 71 percent of the weight about the middle of the bed.'],
   ['native-share', 'note', { ...inBed(), site: { ...makeSheet().site, brief: ['birds'] } }, 'Native plants are 0 percent of the planting by volume; birds raise young where it is 70 percent or more.'],
   ['moisture', 'risk', sited({ moisture: 'wet' }, { water: ['dry', 'medium'] }), 'Wants dry or medium soil; this soil is wet.'],
   ['rain-shadow', 'note', sited({}, { water: ['medium'] }, { facade: { ...makeSheet().facade, overhang: 60 } }), `Stands 5'-0" from the wall, where the roof keeps the rain off; from 6'-0" on rain reaches it. Water it, or choose a plant for dry soil.`],

@@ -38,6 +38,10 @@ describe('evergreen-share', () => {
     expect(of('evergreen-share', plants, [at('d', 100)])[0]).toMatchObject({ kind: 'note', limit: 0.33, measured: { expected: 0 } })
     expect(of('evergreen-share', plants, [at('g', 100)])[0]).toMatchObject({ limit: 0.67, measured: { expected: 1 } })
   })
+  test('in proportion by shears alone it is held, with the unclipped share', () => {
+    const kept = [at('g', 100, { kept: { height: 20, spread: 20 } }), at('g', 160, { kept: { height: 20, spread: 20 } }), at('g', 220, { kept: { height: 20, spread: 20 } }), at('d', 300)]
+    expect(of('evergreen-share', plants, kept)[0]).toMatchObject({ kind: 'held', limit: 0.67, measured: { expected: 0.75 } })
+  })
   test('semi-evergreen counts half, herbaceous plants not at all', () => {
     expect(of('evergreen-share', plants, [at('s', 100), at('h', 200)])).toEqual([])
     expect(of('evergreen-share', plants, [at('h', 100)])).toEqual([])
@@ -86,6 +90,9 @@ describe('balance', () => {
     expect(of('balance', plants, [at('a', 240 - 65), at('a', 240 + 35)])).toEqual([])
     expect(of('balance', plants, [at('a', 240 - 66), at('a', 240 + 34)])[0]).toMatchObject({ kind: 'note', limit: 0.65, measured: { expected: expect.closeTo(0.66, 6) } })
     expect(of('balance', plants, [at('a', 240 - 34), at('a', 240 + 66)])[0]).toMatchObject({ limit: 0.35 })
+  })
+  test('in balance by shears alone it is held', () => {
+    expect(of('balance', plants, [at('a', 240 - 100, { kept: { height: 20, spread: 20 } }), at('a', 240 + 40)])[0]).toMatchObject({ kind: 'held', limit: 0.65 })
   })
   test('one plant in the middle weighs on neither side', () => {
     expect(of('balance', plants, [at('a', 240)])).toEqual([])
