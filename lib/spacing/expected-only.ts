@@ -27,6 +27,9 @@ export function judgeExpected({ rule, one, feature, limit, measure }: Asked): Fi
   return unclipped ? findingOf({ ...about, kind: 'held', ...unclipped }) : null
 }
 
+/** Shares are compared exactly but for the noise of their sums. */
+export const SHARE_NOISE = 1e-9
+
 interface AskedOfBed {
   rule: string
   bed: string

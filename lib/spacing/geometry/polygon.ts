@@ -36,7 +36,8 @@ export function nearestOnOutline(p: Point, points: readonly Point[]): Point {
   return best
 }
 
-function crossesInside(p: Point, points: readonly Point[]): boolean {
+/** Is the point inside? On the edge itself the answer may be either: `pointInPolygon` settles it. */
+export function isInside(p: Point, points: readonly Point[]): boolean {
   let inside = false
   for (let i = 0, j = points.length - 1; i < points.length; j = i++) {
     const a = points[i]!
@@ -50,7 +51,7 @@ function crossesInside(p: Point, points: readonly Point[]): boolean {
 export function distanceToPolygon(p: Point, points: readonly Point[]): Inches {
   const near = nearestOnOutline(p, points)
   const distance = Math.hypot(p.x - near.x, p.y - near.y)
-  return crossesInside(p, points) ? -distance : distance
+  return isInside(p, points) ? -distance : distance
 }
 
 /** A point this near a slanted edge is on it: closer than any drawing, farther than the noise of a sum. */
@@ -58,7 +59,7 @@ const ON_EDGE = 1e-6
 
 /** Is the point inside? The edge counts as inside. */
 export function pointInPolygon(p: Point, points: readonly Point[]): boolean {
-  return crossesInside(p, points) || distanceToPolygon(p, points) <= ON_EDGE
+  return isInside(p, points) || distanceToPolygon(p, points) <= ON_EDGE
 }
 
 const turn = (a: Point, b: Point, c: Point) => Math.sign((b.x - a.x) * (c.y - a.y) - (b.y - a.y) * (c.x - a.x))

@@ -1,9 +1,7 @@
-import { coveredShare, linesOf } from '../cover'
+import { coveredShare, crownsOver } from '../cover'
 import { grownUp } from '../by-bed'
-import { judgeShare } from '../expected-only'
-import { boxOf } from '../geometry/box'
+import { judgeShare, SHARE_NOISE } from '../expected-only'
 import type { Rule } from '../rule'
-import { isOnWall } from '../verdict'
 
 const LEAST_SHARE = 0.7
 /** Crowns carried higher than this leave the soil below them bare. */
@@ -21,15 +19,13 @@ export const cover: Rule = {
     sources: [{ publisher: 'Common practice', title: 'A grown bed covers most of its soil', address: null, known: 'practice' }],
     notes: 'At expected maturity, as kept; crowns whose foliage starts 36 in or more above their soil are left out, and those trained on the wall.',
   },
-  judge: ({ sheet, neighbours }) =>
-    sheet.beds.flatMap((bed) => {
-      const { left, right } = boxOf(bed.outline)
-      const near = neighbours.near(left, right).filter((one) => !isOnWall(one))
-      const lines = linesOf(bed)
+  judge: (prepared) =>
+    prepared.sheet.beds.flatMap((bed) => {
+      const near = crownsOver(prepared, bed)
       return judgeShare({
         rule: 'cover', bed: bed.id,
-        share: (natural) => coveredShare(lines, near.map((one) => grownUp(one, natural)).filter(({ clearStem }) => clearStem < LOW_FOLIAGE_IN)),
-        limitFor: (share) => (share < LEAST_SHARE ? LEAST_SHARE : null),
+        share: (natural) => coveredShare(bed, near.map((one) => grownUp(one, natural)).filter(({ clearStem }) => clearStem < LOW_FOLIAGE_IN)),
+        limitFor: (share) => (share < LEAST_SHARE - SHARE_NOISE ? LEAST_SHARE : null),
       }) ?? []
     }),
 }

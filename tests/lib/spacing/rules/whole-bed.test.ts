@@ -17,8 +17,8 @@ describe('cover', () => {
   const disc = (spread: number, changes = {}) => of('cover', [grown(40, spread, { id: 'p' })], [at('p', 120, { planted: { height: 40, spread }, ...changes })], { beds: square })
   test('seven tenths under crowns will do, less is a note of the bed', () => {
     const enough = 2 * Math.sqrt((0.7 * 1600) / Math.PI)
-    expect(disc(enough + 0.3)).toEqual([])
-    expect(disc(enough - 0.3)[0]).toMatchObject({ kind: 'note', placements: [], feature: 'b1', limit: 0.7, excess: 0 })
+    expect(disc(enough + 1e-6)).toEqual([])
+    expect(disc(enough - 1e-6)[0]).toMatchObject({ kind: 'note', placements: [], feature: 'b1', limit: 0.7, excess: 0 })
     expect(disc(40)).toEqual([])
   })
   test('a bed without plants is judged by this alone', () => {
@@ -63,6 +63,11 @@ describe('same-green', () => {
   test('three of one green pass, four are a note', () => {
     expect(of('same-green', plants, row('a', 'a', 'a', 'b', 'a'))).toEqual([])
     expect(of('same-green', plants, row('a', 'a', 'a', 'a'))[0]).toMatchObject({ kind: 'note', placements: [], measured: { expected: 4 }, limit: 3 })
+  })
+  test('a drift side by side counts as one plant, and so does a hedge', () => {
+    expect(of('same-green', plants, row('a', 'a', 'a', 'a').map((one) => ({ ...one, drift: 'd' })))).toEqual([])
+    expect(of('same-green', plants, row('a', 'a', 'a', 'a').map((one) => ({ ...one, role: 'hedge' as const })))).toEqual([])
+    expect(of('same-green', plants, row('a', 'a', 'a', 'a', 'a').map((one, i) => (i < 2 ? { ...one, drift: 'd' } : one)))).toHaveLength(1)
   })
   test('another texture breaks the run, and so does a gap', () => {
     expect(of('same-green', plants, row('a', 'a', 't', 'a', 'a'))).toEqual([])
