@@ -9,11 +9,12 @@ export interface Expected {
   placements: string[]
   feature: string | null
   limit?: number
-  measured?: Three | null
+  /** Rules of the expected size alone measure that. */
+  measured?: Three | [null, number, null] | null
   excess: number
   /** Earliest, expected, latest, where it was worked out. */
   year?: Three | null
 }
 
-/** The rules these beds were worked out for; findings of others are another page's matter. */
+/** The rules beds were worked out for unless they name their own; findings of others are another page's matter. */
 export const WORKED_RULES = ['sill', 'walk-edge', 'wall-gap', 'gutter', 'outside-bed', 'crowding', 'layer-order', 'hardiness', 'light']
