@@ -4,7 +4,9 @@ import { describe, expect, test } from 'vitest'
 import { check, type Finding, type Sheet } from '@/lib/spacing'
 import { parseSheet } from '@/lib/sheet'
 import { WORKED_RULES, type Expected, type Three } from './expected'
+import { expected as shears, rules as shearRules } from './by-shears'
 import { expected as corners, rules as cornerRules } from './corners-and-door'
+import { expected as drifts, rules as driftRules } from './drift-and-green'
 import { expected as frontWalk } from './front-walk'
 import { expected as ground, rules as groundRules } from './ground-and-water'
 import { expected as joggedWall } from './jogged-wall'
@@ -12,6 +14,8 @@ import { expected as kitchenWindow } from './kitchen-window'
 import { expected as layers } from './layers'
 import { expected as meter, rules as meterRules } from './meter-and-number'
 import { expected as shares, rules as shareRules } from './shares-of-a-bed'
+import { expected as trees, rules as treeRules } from './trees-and-fire'
+import { expected as wrongPlace, rules as siteRules } from './wrong-place'
 
 function read(name: string): Sheet {
   const parsed = parseSheet(JSON.parse(readFileSync(`tests/golden/${name}.json`, 'utf8')))
@@ -58,6 +62,10 @@ describe.each<[name: string, worked: Expected[], rules: readonly string[]]>([
   ['corners-and-door', corners, cornerRules],
   ['ground-and-water', ground, groundRules],
   ['shares-of-a-bed', shares, shareRules],
+  ['wrong-place', wrongPlace, siteRules],
+  ['trees-and-fire', trees, treeRules],
+  ['drift-and-green', drifts, driftRules],
+  ['by-shears', shears, shearRules],
 ])('%s', (name, worked, rules) => {
   test('finds what the hand found, in that order, and nothing else', () => {
     expect(judged(read(name), rules).map(line)).toEqual(worked.map(line))
