@@ -118,6 +118,21 @@ describe('shrubs', () => {
   })
 })
 
+/**
+ * Street crabapples, table page of an arboriculture journal, https://html5.dcatalog.com/?docid=eebf0b91-74a6-4d9e-94c8-a74a015aa833&page=22
+ * (read, columns by position): thirteen twelve-year trees, mean 191 in tall and 197 in wide. Listed size of the kind, 15 to 20 ft
+ * both ways: from memory. Zone 5b.
+ */
+test('twelve-year crabapples: 191 by 197 in, within 30 % and inside the band', () => {
+  const plant = plantOf({ category: 'tree', heightMin: 180, heightMax: 240, spreadMin: 180, spreadMax: 240, growth: 'moderate', leaf: 'deciduous', habit: 'rounded' })
+  const { low, expected, high } = sizes({ plant, planted: NURSERY_TREE, zone: '5b', year: 12 })
+  for (const [measured, extent] of [[191, 'height'], [197, 'spread']] as const) {
+    expect(Math.abs(expected[extent] - measured) / measured).toBeLessThanOrEqual(0.3)
+    expect(low[extent]).toBeLessThanOrEqual(measured)
+    expect(high[extent]).toBeGreaterThanOrEqual(measured)
+  }
+})
+
 interface LibraryRow {
   botanical: string
   height_min: string
