@@ -21,7 +21,8 @@ for (const theme of ['paper', 'outdoors'] as const) {
         await page.goto(path(ids()))
         await page.waitForLoadState('networkidle')
         // A theme changes colors and nothing else: the second is asked of those alone.
-        const axe = new AxeBuilder({ page })
+        // Rows after the fifth repeat those before them.
+        const axe = new AxeBuilder({ page }).exclude('tbody tr:nth-child(n+6)')
         const { violations } = await (theme === 'paper' ? axe : axe.withRules(['color-contrast'])).analyze()
         expect.soft(violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html.slice(0, 160)).join(' | ')}`), file).toEqual([])
         expect.soft(complaints, file).toEqual([])
