@@ -80,3 +80,19 @@ test('axe finds nothing on the table in use', async ({ page }) => {
   await page.getByTestId('plant-picker').getByRole('button', { name: /Abelia/ }).first().click()
   await look('choosing a plant')
 })
+
+test('a pen drags as a finger does', async ({ page }) => {
+  const { spots } = await openTable(page)
+  const before = placementsOf(GARDEN)
+  const one = before[0]!
+  const session = await page.context().newCDPSession(page)
+  const from = spots.inPlan(one.x, one.y)
+  const send = (type: 'mousePressed' | 'mouseMoved' | 'mouseReleased', x: number, y: number) =>
+    session.send('Input.dispatchMouseEvent', { type, x, y, button: 'left', buttons: type === 'mouseReleased' ? 0 : 1, clickCount: 1, pointerType: 'pen' })
+  await send('mousePressed', from.x, from.y)
+  for (let step = 1; step <= 6; step++) await send('mouseMoved', from.x + 3 * step * spots.scale, from.y)
+  await send('mouseReleased', from.x + 18 * spots.scale, from.y)
+  await expect.poll(() => Math.abs(placementsOf(GARDEN)[0]!.x - one.x - 18)).toBeLessThan(2)
+  await page.getByRole('button', { name: /^Undo/ }).click()
+  await expect.poll(() => placementsOf(GARDEN)).toEqual(before)
+})
