@@ -2,14 +2,11 @@
 /** Choosing a plant from the library and setting it: by a tap in the plan, or by two lengths. */
 import { useEffect, useId, useRef, useState } from 'react'
 import { LengthField } from '@/components/site/length-field'
-import { formatLength } from '@/lib/measure'
-import type { Plant } from '@/lib/plants'
+import { rangeText, type Plant } from '@/lib/plants'
 import { outFromWall } from './editor'
 import { useDesk, useEditorState } from './desk-context'
 import { PLAIN, QUIET, STRONG } from './parts'
 import { sheetPlant, usePlantSearch } from './plant-search'
-
-const range = (low: number, high: number) => (low === high ? formatLength(low) : `${formatLength(low)} to ${formatLength(high)}`)
 
 function PlantRow({ plant, isChosen, onChoose }: { plant: Plant; isChosen: boolean; onChoose: () => void }) {
   return (
@@ -22,7 +19,7 @@ function PlantRow({ plant, isChosen, onChoose }: { plant: Plant; isChosen: boole
       >
         <span className="block font-heading text-lg leading-tight italic">{plant.botanical}</span>
         <span className="block">{plant.common}</span>
-        <span className="block font-mono text-sm text-ink-soft">{range(plant.heightMin, plant.heightMax)} tall, {range(plant.spreadMin, plant.spreadMax)} across</span>
+        <span className="block font-mono text-sm text-ink-soft">{rangeText(plant.heightMin, plant.heightMax)} tall, {rangeText(plant.spreadMin, plant.spreadMax)} across</span>
       </button>
     </li>
   )

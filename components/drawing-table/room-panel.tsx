@@ -4,7 +4,7 @@ import { useMutation } from '@tanstack/react-query'
 import { useEffect, useState } from 'react'
 import { LengthField } from '@/components/site/length-field'
 import { formatLength } from '@/lib/measure'
-import type { Plant } from '@/lib/plants'
+import { rangeText, type Plant } from '@/lib/plants'
 import { describeMiss, wallDistance, type Fit, type NearMiss, type Sheet, type Size } from '@/lib/spacing'
 import { ask } from './calls'
 import { useDesk, useEditorState } from './desk-context'
@@ -31,7 +31,6 @@ async function askFits(facadeId: string, spot: Spot): Promise<FitsAnswer> {
 }
 
 const sizeText = ({ height, spread }: Size) => `${formatLength(height)} high and ${formatLength(spread)} across`
-const rangeText = (low: number, high: number) => (low === high ? formatLength(low) : `${formatLength(low)} to ${formatLength(high)}`)
 
 /** Crowns of another habit, or that may overlap more, come to more than the mounded one. */
 const fillText = (fill: number) => (fill >= 0.95 ? 'fills the room' : `fills ${Math.round(fill * 100)} percent of the room`)

@@ -72,8 +72,8 @@ function Rule({ meta, values, state, canEdit }: { meta: RuleMeta; values: Values
   )
 }
 
-function Search({ onText }: { onText: (text: string) => void }) {
-  return <TextField type="search" label="Find a rule" placeholder="sill, walk, deer" autoComplete="off" onChange={(event) => onText(event.target.value)} className="max-w-md" />
+function Search({ text, onText }: { text: string; onText: (text: string) => void }) {
+  return <TextField type="search" label="Find a rule" placeholder="sill, walk, deer" autoComplete="off" value={text} onChange={(event) => onText(event.target.value)} className="max-w-md" />
 }
 
 const holds = ({ title, question, settings }: RuleMeta, text: string) => [title, question, ...settings.map(({ label }) => label)].join(' ').toLocaleLowerCase('en-US').includes(text)
@@ -92,7 +92,7 @@ export function StandardsForm({ values, canEdit, action }: Props) {
   return (
     // Saved or refused, the fields start anew with what stands or what was typed.
     <form key={JSON.stringify([state.typed, values])} action={submit} className="grid gap-4">
-      <Search onText={setText} />
+      <Search text={text} onText={setText} />
       <div role="status">{shown.size === 0 ? 'No rule speaks of that. Try fewer letters.' : <Outcome state={state} />}</div>
       {/* Rules that are not looked for stay in the form, so that nothing they hold is lost. */}
       {STANDARDS.map((meta) => <div key={meta.id} hidden={!shown.has(meta.id)}><Rule meta={meta} values={values} state={state} canEdit={canEdit} /></div>)}

@@ -11,8 +11,8 @@ export function BedsTable({ takeoff: { beds, squareFeet, depth, mulch } }: { tak
       <table className="w-full max-w-xl border-collapse border border-rule bg-sheet print:border-0">
         <thead><tr><th scope="col" className="px-3 py-2 text-left">Bed</th><th scope="col" className="px-3 py-2 text-right">Area</th></tr></thead>
         <tbody>
-          {beds.map(({ name, squareFeet: area }) => (
-            <tr key={name} className="border-t border-rule"><th scope="row" className="px-3 py-2 text-left font-normal">{name}</th><td className="px-3 py-2 text-right font-mono tabular-nums">{feet(area)}</td></tr>
+          {beds.map(({ name, squareFeet: area }, i) => (
+            <tr key={i} className="border-t border-rule"><th scope="row" className="px-3 py-2 text-left font-normal">{name}</th><td className="px-3 py-2 text-right font-mono tabular-nums">{feet(area)}</td></tr>
           ))}
         </tbody>
         <tfoot>

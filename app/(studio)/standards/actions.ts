@@ -35,11 +35,17 @@ function readForm(form: FormData): Typed {
   return read
 }
 
+/** The fields at fault by rule and label: the form is long, and they may stand far from its top. */
+function faultsText(fields: Record<string, string>): string {
+  const named = STANDARDS.flatMap(({ title, settings }) => settings.flatMap(({ name, label }) => (fields[name] ? [`${title}, ${label.toLowerCase()}: ${fields[name]}`] : [])))
+  return named.join(' ')
+}
+
 /** Saves the studio's standards over those the page was opened with. */
 export async function saveStandardsAction(opened: Record<string, number | string>, _before: StandardsState, form: FormData): Promise<StandardsState> {
   const context = await requireContext('member')
   const { values, fields, typed } = readForm(form)
-  if (Object.keys(fields).length > 0) return { error: 'Some entries do not fit. Nothing was changed.', checked: null, fields, typed }
+  if (Object.keys(fields).length > 0) return { error: `${faultsText(fields)} Nothing was changed.`, checked: null, fields, typed }
   const answer = await runAction('save standards', () => saveStandards(context, { values, opened }))
   if (!answer.ok) {
     const named = Object.fromEntries((answer.error.problems ?? []).map(({ path, message }) => [String(path[0]), message]))

@@ -1,7 +1,8 @@
-import { and, eq, inArray, isNull, or, sql } from 'drizzle-orm'
+import { and, inArray, sql } from 'drizzle-orm'
 import type { Db } from '@/db/open'
 import { plants } from '@/db/schema'
 import type { Plant } from '@/lib/plants'
+import { isVisibleTo } from '../plants/library-rows'
 
 /** The columns that stand in a sheet: a plant's facts without whose it is or where they were read. */
 const SHEET_COLUMNS = {
@@ -12,8 +13,6 @@ const SHEET_COLUMNS = {
   bloomColor: plants.bloomColor, deer: plants.deer, toxicity: plants.toxicity, juglone: plants.juglone,
   thorns: plants.thorns, invasive: plants.invasive, native: plants.native, prune: plants.prune,
 }
-
-const isVisibleTo = (studioId: string) => or(isNull(plants.studioId), eq(plants.studioId, studioId))
 
 /** Every plant the studio may use (shared ones and its own), by botanical name. */
 export function libraryPlants(db: Db, studioId: string): Plant[] {
