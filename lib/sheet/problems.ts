@@ -2,7 +2,7 @@
  * What the fields of a sheet owe each other: sill under head, windows on the wall, outlines that do not cross
  * themselves, plants that are known. Every problem names its field and says a plain sentence.
  */
-import { STANDARDS, polygonCrossesItself, polygonArea, type Point, type Sheet } from '../spacing'
+import { pairsThatMeet, STANDARDS, polygonCrossesItself, polygonArea, type Point, type Sheet } from '../spacing'
 
 /** A field by its path in the sheet, and what is wrong with it. */
 export interface Problem {
@@ -75,6 +75,16 @@ function placementProblems({ plants, placements }: Sheet): Problem[] {
   )
 }
 
+/** Pairs of plants that grow into one another, at most: a bed of two thousand has some ten thousand, a heap ten times that. */
+export const MAX_PAIRS = 15_000
+
+function heapProblems(sheet: Sheet): Problem[] {
+  const pairs = pairsThatMeet(sheet)
+  if (pairs <= MAX_PAIRS) return []
+  const [found, most] = [pairs, MAX_PAIRS].map((count) => count.toLocaleString('en-US'))
+  return [{ path: ['placements'], message: `Too many plants stand in one place: ${found} pairs would grow into each other, and at most ${most} are judged. Set them farther apart, or take some away.` }]
+}
+
 function twinProblems(sheet: Sheet): Problem[] {
   return (['openings', 'fixtures', 'walks', 'beds', 'plants', 'placements'] as const).flatMap((list) => {
     const seen = new Set<string>()
@@ -110,5 +120,5 @@ function standardProblems({ standards = {} }: Sheet): Problem[] {
 
 /** All that is wrong between the fields of a sheet whose single fields are fair; [] when it is sound. */
 export function findProblems(sheet: Sheet): Problem[] {
-  return [wallProblems, openingProblems, outlineProblems, placementProblems, twinProblems, standardProblems].flatMap((find) => find(sheet))
+  return [wallProblems, openingProblems, outlineProblems, placementProblems, heapProblems, twinProblems, standardProblems].flatMap((find) => find(sheet))
 }

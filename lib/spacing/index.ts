@@ -7,6 +7,7 @@ export {
   crownOf, GROWTH_SOURCES, matureSize, sizeAt, sizeRange, yearOfHeight, zoneNumber,
   type CrownArgs, type SizeArgs, type When,
 } from './growth'
+export { pairsThatMeet } from './pairs'
 export { gradeAt, groundAt } from './geometry/ground'
 export { wallDistance, wallY } from './geometry/wall'
 export { distanceToPolygon, pointInPolygon, polygonArea, polygonCrossesItself } from './geometry/polygon'

@@ -25,7 +25,7 @@ const WORDS: Record<string, RuleWords> = { ...CLEARANCES, ...FIXTURES, ...NEIGHB
 
 /** A finding in words: who, what, by how much, when. Names what is no longer on the sheet as such. */
 export function describe(finding: Finding, sheet: Sheet): Description {
-  const names = new Names(sheet)
+  const names = Names.of(sheet)
   const words = WORDS[finding.rule]
   const sentence = words ? words.say(finding, names, sheet) : `Judged by a rule this version does not know: ${finding.rule}.`
   const plants = () => [...new Set(finding.placements.map((id) => names.plant(id)))].join(' and ')

@@ -1,22 +1,38 @@
 import type { Plant } from '../../plants/types'
-import type { Fixture, Sheet } from '../types'
+import type { Fixture, Placement, Sheet } from '../types'
 
 const FIXTURE_NAMES: Record<Fixture['kind'], string> = {
   'electric-meter': 'the electric meter', 'gas-meter': 'the gas meter', condenser: 'the condenser', 'hose-bib': 'the hose bib', vent: 'the vent',
   downspout: 'the downspout', 'house-number': 'the house number', 'entry-light': 'the entry light', 'escape-well': 'the escape well',
 }
 
+/** Things by their ids; of two alike the first. */
+const byId = <T extends { id: string }>(things: readonly T[]): Map<string, T> => new Map(things.toReversed().map((thing) => [thing.id, thing]))
+
 /** Looks up what a finding speaks of; what is no longer on the sheet is named as such. */
 export class Names {
-  constructor(private readonly sheet: Sheet) {}
+  private static readonly known = new WeakMap<Sheet, Names>()
+  private readonly placements: Map<string, Placement>
+  private readonly plants: Map<string, Plant>
+
+  private constructor(private readonly sheet: Sheet) {
+    this.placements = byId(sheet.placements)
+    this.plants = byId(sheet.plants)
+  }
+
+  /** The names of a sheet, listed once for its hundreds of findings. */
+  static of(sheet: Sheet): Names {
+    let names = Names.known.get(sheet)
+    if (!names) Names.known.set(sheet, (names = new Names(sheet)))
+    return names
+  }
 
   plantOf(placement: string | undefined): Plant | undefined {
-    const found = this.sheet.placements.find(({ id }) => id === placement)
-    return this.plantById(found?.plant ?? null)
+    return this.plantById(this.placements.get(placement ?? '')?.plant ?? null)
   }
 
   plantById(id: string | null): Plant | undefined {
-    return this.sheet.plants.find((plant) => plant.id === id)
+    return this.plants.get(id ?? '')
   }
 
   /** The botanical name of a placement's plant. */

@@ -20,7 +20,7 @@ const whom = (finding: Finding, placement: string, names: Names) => (finding.pla
 
 /** A way out in words. `plants` are those that may be swapped in, beside the sheet's own. */
 export function describeRemedy(remedy: Remedy, finding: Finding, sheet: Sheet, plants: readonly Plant[] = []): string {
-  const names = new Names(sheet)
+  const names = Names.of(sheet)
   switch (remedy.kind) {
     case 'move': {
       const from = sheet.placements.find(({ id }) => id === remedy.placement)
@@ -44,7 +44,7 @@ export const NO_WAY_OUT = 'No way out found: no place within 4 ft, no clipping a
 
 /** Why a plant just misses: "2 in too wide for Front walk at its largest". */
 export function describeMiss(finding: Finding, sheet: Sheet): string {
-  const names = new Names(sheet)
+  const names = Names.of(sheet)
   const by = lengthText(finding.excess)
   const end = finding.kind === 'risk' ? ' at its largest' : ''
   const near = finding.placements.find((id) => sheet.placements.some((placement) => placement.id === id))
